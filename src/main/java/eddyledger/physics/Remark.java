@@ -1,0 +1,36 @@
+package eddyledger.physics;
+
+/**
+ * Something a formula has to say about its own use: it left its published range, or it had to fill
+ * in a quantity. The ledger turns remarks into findings and into notes of the trace.
+ *
+ * @param kind what sort of remark it is
+ * @param text what was met, with numbers and units, in a sentence a reader of the trace understands
+ */
+public record Remark(Kind kind, String text) {
+
+  /** Sorts of remark. */
+  public enum Kind {
+    /** The formula is used outside the range its source states. */
+    OUT_OF_RANGE,
+    /** A quantity was not given and was filled in by a stated rule. */
+    FILLED_IN,
+    /** Worth knowing, no doubt about the value. */
+    NOTE
+  }
+
+  /** A remark that a formula is used outside its range. */
+  public static Remark outOfRange(String text) {
+    return new Remark(Kind.OUT_OF_RANGE, text);
+  }
+
+  /** A remark that a quantity was filled in. */
+  public static Remark filledIn(String text) {
+    return new Remark(Kind.FILLED_IN, text);
+  }
+
+  /** A remark without doubt. */
+  public static Remark note(String text) {
+    return new Remark(Kind.NOTE, text);
+  }
+}
