@@ -110,15 +110,14 @@ public final class BoundaryLayerCompletion {
       double found = ShapeRelation.momentum(delta, displacement);
       momentum = given("momentum thickness", null, found, "m", rule);
     }
-    double friction =
-        LudwiegTillmann.skinFriction(displacement / momentum, unitReynolds * momentum);
-    double stress =
-        given(
-            "wall shear stress",
-            input.wallShearStress(),
-            stressAt(friction),
-            "Pa",
-            "from shape factor and momentum thickness after Ludwieg and Tillmann");
+    if (input.wallShearStress() != null) {
+      return finish(delta, displacement, momentum, input.wallShearStress());
+    }
+    double reynolds = unitReynolds * momentum;
+    double friction = LudwiegTillmann.skinFriction(displacement / momentum, reynolds);
+    remarks.addAll(LudwiegTillmann.remarks(reynolds));
+    rule = "from shape factor and momentum thickness after Ludwieg and Tillmann";
+    double stress = given("wall shear stress", null, stressAt(friction), "Pa", rule);
     return finish(delta, displacement, momentum, stress);
   }
 
