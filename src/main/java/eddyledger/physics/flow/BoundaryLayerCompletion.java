@@ -1,6 +1,6 @@
 package eddyledger.physics.flow;
 
-import static eddyledger.physics.flow.Numbers.text;
+import static eddyledger.physics.Wording.number;
 
 import eddyledger.physics.Remark;
 import java.util.ArrayList;
@@ -25,6 +25,9 @@ import java.util.OptionalDouble;
  * <p>Checked by {@code BoundaryLayerReferenceTest} and {@code BoundaryLayerCompletionTest}.
  */
 public final class BoundaryLayerCompletion {
+  /** Ratio of lengths from which on a given thickness and a given length are called at odds. */
+  private static final double CONTRADICTION = 2.0;
+
   private final EdgeFlow edge;
   private final LayerAir air;
   private final BoundaryLayerInput input;
@@ -126,7 +129,8 @@ public final class BoundaryLayerCompletion {
     if (given != null) {
       return given;
     }
-    remarks.add(Remark.filledIn(quantity + " " + text(found) + " " + unit + " filled in " + rule));
+    remarks.add(
+        Remark.filledIn(quantity + " " + number(found) + " " + unit + " filled in " + rule));
     return found;
   }
 
@@ -153,17 +157,28 @@ public final class BoundaryLayerCompletion {
   }
 
   private OptionalDouble runningLength(double momentum) {
-    if (input.runningLength() != null) {
-      return OptionalDouble.of(input.runningLength());
+    OptionalDouble implied = WhiteFriction.runningLength(momentum, unitReynolds);
+    Double given = input.runningLength();
+    if (given != null) {
+      implied.ifPresent(length -> noteContradiction(given, length));
+      return OptionalDouble.of(given);
     }
-    OptionalDouble length = WhiteFriction.runningLength(momentum, unitReynolds);
-    if (length.isPresent()) {
+    if (implied.isPresent()) {
       String rule = "as the length of turbulent flow that would give this momentum thickness";
-      given("running length", null, length.getAsDouble(), "m", rule);
+      given("running length", null, implied.getAsDouble(), "m", rule);
     } else {
       remarks.add(
           Remark.note("no running length of turbulent flow gives so thin a momentum thickness"));
     }
-    return length;
+    return implied;
+  }
+
+  private void noteContradiction(double given, double implied) {
+    double ratio = implied / given;
+    if (ratio > CONTRADICTION || ratio < 1.0 / CONTRADICTION) {
+      String thickness = "the given thickness belongs to a running length of ";
+      String length = number(implied) + " m, the given running length is " + number(given) + " m";
+      remarks.add(Remark.note(thickness + length));
+    }
   }
 }

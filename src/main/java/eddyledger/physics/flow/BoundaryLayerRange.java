@@ -1,6 +1,6 @@
 package eddyledger.physics.flow;
 
-import static eddyledger.physics.flow.Numbers.text;
+import static eddyledger.physics.Wording.number;
 
 import eddyledger.physics.Remark;
 import java.util.ArrayList;
@@ -35,8 +35,8 @@ final class BoundaryLayerRange {
   private static void check(
       List<Remark> remarks, String quantity, double value, double low, double high, String more) {
     if (value < low || value > high) {
-      String range = " is outside " + text(low) + " to " + text(high);
-      remarks.add(Remark.outOfRange(quantity + " " + text(value) + range + more));
+      String range = " is outside " + number(low) + " to " + number(high);
+      remarks.add(Remark.outOfRange(quantity + " " + number(value) + range + more));
     }
   }
 }

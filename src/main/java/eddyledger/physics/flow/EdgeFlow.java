@@ -1,7 +1,7 @@
 package eddyledger.physics.flow;
 
+import static eddyledger.physics.Wording.number;
 import static eddyledger.physics.flow.Numbers.requirePositive;
-import static eddyledger.physics.flow.Numbers.text;
 
 import eddyledger.physics.Remark;
 import java.util.List;
@@ -81,7 +81,7 @@ public record EdgeFlow(double speed, AirState air, List<Remark> remarks) {
     double mach = freeStreamSpeed / freeStream.soundSpeed();
     double vacuum = IsentropicFlow.vacuumPressureCoefficient(mach);
     double stagnation = IsentropicFlow.stagnationPressureCoefficient(mach);
-    requireBetween(pressureCoefficient, vacuum, stagnation, "at Mach " + text(mach));
+    requireBetween(pressureCoefficient, vacuum, stagnation, "at Mach " + number(mach));
     double excess = IsentropicFlow.temperatureExcess(pressureCoefficient, mach);
     double speed = freeStreamSpeed * Math.sqrt(IsentropicFlow.squaredSpeedRatio(excess, mach));
     return of(IsentropicFlow.brought(freeStream, excess), speed);
@@ -105,7 +105,7 @@ public record EdgeFlow(double speed, AirState air, List<Remark> remarks) {
     Remark remark =
         Remark.outOfRange(
             "incompressible edge flow used at free-stream Mach "
-                + text(mach)
+                + number(mach)
                 + "; it holds below 0.3");
     return new EdgeFlow(speed, freeStream, List.of(remark));
   }
@@ -127,11 +127,11 @@ public record EdgeFlow(double speed, AirState air, List<Remark> remarks) {
     if (!(excess > -1.0)) {
       throw new IllegalArgumentException(
           "local flow speed "
-              + text(localSpeed)
+              + number(localSpeed)
               + " m/s is past the vacuum limit of "
-              + text(freeStreamSpeed)
+              + number(freeStreamSpeed)
               + " m/s at Mach "
-              + text(mach));
+              + number(mach));
     }
     return of(IsentropicFlow.brought(freeStream, excess), localSpeed);
   }
@@ -140,9 +140,9 @@ public record EdgeFlow(double speed, AirState air, List<Remark> remarks) {
     if (!(value > low && value < high)) {
       throw new IllegalArgumentException(
           "pressure coefficient must be above "
-              + text(low)
+              + number(low)
               + " (vacuum) and below "
-              + text(high)
+              + number(high)
               + " (stagnation) "
               + where
               + ", not "
@@ -158,7 +158,7 @@ public record EdgeFlow(double speed, AirState air, List<Remark> remarks) {
     return List.of(
         Remark.outOfRange(
             "local Mach number "
-                + text(mach)
+                + number(mach)
                 + " is past the sonic point: shocks, neither the loss-free path nor the attached"
                 + " boundary layer holds"));
   }

@@ -1,6 +1,7 @@
 package eddyledger.physics.flow;
 
 import eddyledger.physics.Remark;
+import eddyledger.physics.Wording;
 import java.util.List;
 
 /**
@@ -37,7 +38,7 @@ final class LudwiegTillmann {
     return List.of(
         Remark.outOfRange(
             "friction after Ludwieg and Tillmann used at momentum-thickness Reynolds number "
-                + Numbers.text(momentumReynolds)
+                + Wording.number(momentumReynolds)
                 + "; it holds from 500 to 30000 and comes out low above: give the wall shear stress"
                 + " if it is known"));
   }

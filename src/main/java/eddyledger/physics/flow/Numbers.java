@@ -1,8 +1,6 @@
 package eddyledger.physics.flow;
 
-import java.util.Locale;
-
-/** Checks of numbers and their wording in remarks and messages. */
+/** Checks of numbers. */
 final class Numbers {
   private Numbers() {}
 
@@ -16,10 +14,5 @@ final class Numbers {
       String shown = value + (unit.isEmpty() ? "" : " " + unit);
       throw new IllegalArgumentException(quantity + " must be above 0 and finite, not " + shown);
     }
-  }
-
-  /** Four significant digits, the same in every locale. */
-  static String text(double value) {
-    return String.format(Locale.ROOT, "%.4g", value);
   }
 }

@@ -1,5 +1,7 @@
 package eddyledger.physics.flow;
 
+import eddyledger.physics.Wording;
+
 /**
  * The third thickness of a turbulent layer from two of them.
  *
@@ -27,9 +29,9 @@ final class ShapeRelation {
     if (!(h > 0.0)) {
       throw new IllegalArgumentException(
           "displacement thickness "
-              + Numbers.text(displacement)
+              + Wording.number(displacement)
               + " m must be above the momentum thickness "
-              + Numbers.text(momentum)
+              + Wording.number(momentum)
               + " m");
     }
     return displacement + momentum * (CONSTANT + SLOPE / h);
@@ -43,9 +45,9 @@ final class ShapeRelation {
     if (!(sum > 0.0 && discriminant >= 0.0)) {
       throw new IllegalArgumentException(
           "thickness "
-              + Numbers.text(thickness)
+              + Wording.number(thickness)
               + " m is less than 6.77 times the momentum thickness "
-              + Numbers.text(momentum)
+              + Wording.number(momentum)
               + " m: no attached boundary layer");
     }
     return momentum * (1.0 + 2.0 * SLOPE / (sum + Math.sqrt(discriminant)));
@@ -58,9 +60,9 @@ final class ShapeRelation {
     if (!(a > 0.0)) {
       throw new IllegalArgumentException(
           "thickness "
-              + Numbers.text(thickness)
+              + Wording.number(thickness)
               + " m must be above the displacement thickness "
-              + Numbers.text(displacement)
+              + Wording.number(displacement)
               + " m");
     }
     double b = CONSTANT - a;

@@ -1,5 +1,6 @@
 package eddyledger.physics.flow;
 
+import eddyledger.physics.Wording;
 import org.apache.commons.math3.analysis.UnivariateFunction;
 import org.apache.commons.math3.analysis.solvers.BracketingNthOrderBrentSolver;
 
@@ -82,7 +83,7 @@ final class WallWakeClosure {
     double lowest = logLaw(Math.log(LOWEST_REYNOLDS));
     double highest = logLaw(Math.log(HIGHEST_REYNOLDS));
     if (!(excess.value(lowest) >= 0.0 && excess.value(highest) <= 0.0)) {
-      throw outside("a thickness with a Reynolds number of " + Numbers.text(reynolds));
+      throw outside("a thickness with a Reynolds number of " + Wording.number(reynolds));
     }
     return new BracketingNthOrderBrentSolver(1e-15, 1e-14, 0.0, 5)
         .solve(200, excess, lowest, highest);
@@ -93,7 +94,7 @@ final class WallWakeClosure {
     // the bounds themselves belong to the range, rounding must not throw them out
     if (!(frictionReynolds > LOWEST_REYNOLDS * 0.999
         && frictionReynolds < HIGHEST_REYNOLDS * 1.001)) {
-      throw outside("a friction Reynolds number of " + Numbers.text(frictionReynolds));
+      throw outside("a friction Reynolds number of " + Wording.number(frictionReynolds));
     }
     double displacement = thickness * FIRST / lambda;
     double momentum = thickness * (FIRST / lambda - SECOND / (lambda * lambda));

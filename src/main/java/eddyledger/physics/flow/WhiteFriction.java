@@ -1,5 +1,6 @@
 package eddyledger.physics.flow;
 
+import eddyledger.physics.Wording;
 import java.util.OptionalDouble;
 import org.apache.commons.math3.analysis.solvers.BracketingNthOrderBrentSolver;
 
@@ -36,9 +37,9 @@ final class WhiteFriction {
     if (!(log > 2.0)) {
       throw new IllegalArgumentException(
           "running length "
-              + Numbers.text(length)
+              + Wording.number(length)
               + " m is too short for a turbulent boundary layer: Reynolds number "
-              + Numbers.text(unitReynolds * length));
+              + Wording.number(unitReynolds * length));
     }
     return 0.5 * FACTOR * length / (log * log);
   }

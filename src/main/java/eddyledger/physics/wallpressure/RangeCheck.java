@@ -1,8 +1,8 @@
 package eddyledger.physics.wallpressure;
 
 import eddyledger.physics.Remark;
+import eddyledger.physics.Wording;
 import java.util.List;
-import java.util.Locale;
 
 /** Words for a model that is used outside the range of its source. */
 final class RangeCheck {
@@ -12,16 +12,9 @@ final class RangeCheck {
   static void add(
       List<Remark> remarks, String model, String quantity, double value, double low, double high) {
     if (!(value >= low && value <= high)) {
-      remarks.add(
-          Remark.outOfRange(
-              String.format(
-                  Locale.ROOT,
-                  "%s is used at %s %.4g; its range is %.4g to %.4g",
-                  model,
-                  quantity,
-                  value,
-                  low,
-                  high)));
+      String range = "; its range is " + Wording.number(low) + " to " + Wording.number(high);
+      String use = model + " is used at " + quantity + " " + Wording.number(value);
+      remarks.add(Remark.outOfRange(use + range));
     }
   }
 }

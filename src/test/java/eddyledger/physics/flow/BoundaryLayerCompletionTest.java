@@ -137,6 +137,23 @@ class BoundaryLayerCompletionTest {
   }
 
   @Test
+  void notesAThicknessAtOddsWithTheRunningLength() {
+    assertThat(notes(new BoundaryLayerInput(0.3, 0.03, null, null, null)))
+        .singleElement()
+        .satisfies(text -> assertThat(text).contains("the given running length is 0.3 m"));
+    assertThat(notes(new BoundaryLayerInput(20.0, 0.03, null, null, null))).hasSize(1);
+    assertThat(notes(new BoundaryLayerInput(2.0, 0.03, null, null, null))).isEmpty();
+    assertThat(notes(new BoundaryLayerInput(2.0, null, null, null, 1.7))).isEmpty();
+  }
+
+  private static List<String> notes(BoundaryLayerInput input) {
+    return BoundaryLayerCompletion.complete(ROAD, input).remarks().stream()
+        .filter(remark -> remark.kind() == Remark.Kind.NOTE)
+        .map(Remark::text)
+        .toList();
+  }
+
+  @Test
   void anUncompressedEdgeBarelyChangesTheAirAtTheWall() {
     BoundaryLayer layer =
         BoundaryLayerCompletion.complete(

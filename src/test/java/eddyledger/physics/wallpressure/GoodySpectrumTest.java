@@ -42,7 +42,7 @@ class GoodySpectrumTest extends WallPressureSpectrumContract {
         .anyMatch(
             remark ->
                 remark.text().contains("momentum-thickness Reynolds number")
-                    && remark.text().contains("1400 to 2.300e+04"));
+                    && remark.text().contains("1400 to 23000"));
   }
 
   @Test
