@@ -5,9 +5,10 @@ package eddyledger.physics;
  * in a quantity. The ledger turns remarks into findings and into notes of the trace.
  *
  * @param kind what sort of remark it is
+ * @param topic the same words whatever the numbers, so that remarks of many panels can be gathered
  * @param text what was met, with numbers and units, in a sentence a reader of the trace understands
  */
-public record Remark(Kind kind, String text) {
+public record Remark(Kind kind, String topic, String text) {
 
   /** Sorts of remark. */
   public enum Kind {
@@ -20,17 +21,17 @@ public record Remark(Kind kind, String text) {
   }
 
   /** A remark that a formula is used outside its range. */
-  public static Remark outOfRange(String text) {
-    return new Remark(Kind.OUT_OF_RANGE, text);
+  public static Remark outOfRange(String topic, String text) {
+    return new Remark(Kind.OUT_OF_RANGE, topic, text);
   }
 
   /** A remark that a quantity was filled in. */
-  public static Remark filledIn(String text) {
-    return new Remark(Kind.FILLED_IN, text);
+  public static Remark filledIn(String quantity, String text) {
+    return new Remark(Kind.FILLED_IN, quantity, text);
   }
 
   /** A remark without doubt. */
-  public static Remark note(String text) {
-    return new Remark(Kind.NOTE, text);
+  public static Remark note(String topic, String text) {
+    return new Remark(Kind.NOTE, topic, text);
   }
 }

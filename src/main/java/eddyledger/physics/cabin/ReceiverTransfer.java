@@ -14,9 +14,9 @@ package eddyledger.physics.cabin;
  * </ul>
  *
  * <p>Source: Kuttruff, Room Acoustics (direct and reverberant field of a source in a room). The
- * factor (1 − ᾱ) takes away the power that the direct sound loses at its first reflection before it
- * feeds the diffuse field; it stands only where the direct sound is counted on its own, for else
- * its power would be lost from the balance.
+ * factor (1 − ᾱ), from memory, takes away the power that the direct sound loses at its first
+ * reflection before it feeds the diffuse field; it stands only where the direct sound is counted on
+ * its own, for else its power would be lost from the balance.
  *
  * <p>Range: direct sound only within the receiver's own zone. Contributions of panels add as mean
  * squares.

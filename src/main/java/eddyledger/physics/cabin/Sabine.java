@@ -74,6 +74,7 @@ public final class Sabine {
     }
     return Optional.of(
         Remark.outOfRange(
+            "mean absorption of a diffuse zone",
             String.format(
                 Locale.ROOT,
                 "mean absorption %.2f is above %.1f: the zone is not diffuse, "

@@ -64,6 +64,7 @@ public final class SchroederFrequency {
     }
     return Optional.of(
         Remark.outOfRange(
+            "Schroeder frequency",
             String.format(
                 Locale.ROOT,
                 "%.0f Hz is below the zone's Schroeder frequency of %.0f Hz: "

@@ -130,7 +130,8 @@ public final class BoundaryLayerCompletion {
       return given;
     }
     remarks.add(
-        Remark.filledIn(quantity + " " + number(found) + " " + unit + " filled in " + rule));
+        Remark.filledIn(
+            quantity, quantity + " " + number(found) + " " + unit + " filled in " + rule));
     return found;
   }
 
@@ -168,7 +169,9 @@ public final class BoundaryLayerCompletion {
       given("running length", null, implied.getAsDouble(), "m", rule);
     } else {
       remarks.add(
-          Remark.note("no running length of turbulent flow gives so thin a momentum thickness"));
+          Remark.note(
+              "no running length",
+              "no running length of turbulent flow gives so thin a momentum thickness"));
     }
     return implied;
   }
@@ -178,7 +181,7 @@ public final class BoundaryLayerCompletion {
     if (ratio > CONTRADICTION || ratio < 1.0 / CONTRADICTION) {
       String thickness = "the given thickness belongs to a running length of ";
       String length = number(implied) + " m, the given running length is " + number(given) + " m";
-      remarks.add(Remark.note(thickness + length));
+      remarks.add(Remark.note("thickness at odds with the running length", thickness + length));
     }
   }
 }

@@ -36,7 +36,9 @@ final class BoundaryLayerRange {
       List<Remark> remarks, String quantity, double value, double low, double high, String more) {
     if (value < low || value > high) {
       String range = " is outside " + number(low) + " to " + number(high);
-      remarks.add(Remark.outOfRange(quantity + " " + number(value) + range + more));
+      remarks.add(
+          Remark.outOfRange(
+              quantity + " out of range", quantity + " " + number(value) + range + more));
     }
   }
 }

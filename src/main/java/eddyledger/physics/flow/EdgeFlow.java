@@ -104,6 +104,7 @@ public record EdgeFlow(double speed, AirState air, List<Remark> remarks) {
     }
     Remark remark =
         Remark.outOfRange(
+            "incompressible edge flow at high Mach number",
             "incompressible edge flow used at free-stream Mach "
                 + number(mach)
                 + "; it holds below 0.3");
@@ -157,6 +158,7 @@ public record EdgeFlow(double speed, AirState air, List<Remark> remarks) {
     }
     return List.of(
         Remark.outOfRange(
+            "local flow past the sonic point",
             "local Mach number "
                 + number(mach)
                 + " is past the sonic point: shocks, neither the loss-free path nor the attached"

@@ -37,6 +37,7 @@ final class LudwiegTillmann {
     }
     return List.of(
         Remark.outOfRange(
+            "friction after Ludwieg and Tillmann out of range",
             "friction after Ludwieg and Tillmann used at momentum-thickness Reynolds number "
                 + Wording.number(momentumReynolds)
                 + "; it holds from 500 to 30000 and comes out low above: give the wall shear stress"

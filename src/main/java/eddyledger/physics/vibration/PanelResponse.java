@@ -168,6 +168,7 @@ public final class PanelResponse {
       }
       return List.of(
           Remark.note(
+              "very many modes",
               "The highest band sums "
                   + most
                   + " modes. Entered as several equal bays with a count, the panel takes less"

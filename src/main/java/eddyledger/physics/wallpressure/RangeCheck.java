@@ -14,7 +14,7 @@ final class RangeCheck {
     if (!(value >= low && value <= high)) {
       String range = "; its range is " + Wording.number(low) + " to " + Wording.number(high);
       String use = model + " is used at " + quantity + " " + Wording.number(value);
-      remarks.add(Remark.outOfRange(use + range));
+      remarks.add(Remark.outOfRange(model + " outside its range of " + quantity, use + range));
     }
   }
 }
