@@ -18,7 +18,8 @@ final class Findings {
 
   void add(
       Severity severity, String code, String subject, String place, String what, String remedy) {
-    all.add(new Finding(severity, code, subject, place, what, remedy));
+    // a part whose id is missing is still named by its place
+    all.add(new Finding(severity, code, subject == null ? "" : subject, place, what, remedy));
   }
 
   /** A number that must be there and lie within its limit. */

@@ -1,0 +1,66 @@
+package eddyledger.file;
+
+import com.fasterxml.jackson.databind.node.ObjectNode;
+import eddyledger.model.LayUp;
+import eddyledger.model.TableContent;
+import eddyledger.model.TabulatedLayUp;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Set;
+
+/** A lay-up; the type says of which kind. */
+final class LayUpCodec implements RecordCodec<LayUp> {
+  static final LayUpCodec LAY_UP = new LayUpCodec();
+
+  private static final String TYPE = "type";
+  private static final String[] TYPES = {"insertion-loss"};
+  private static final String INSERTION_LOSS = "insertion_loss_dB";
+  private static final String BASE_MASS = "base_surface_mass_kg_per_m2";
+  private static final String INCLUDES = "includes";
+
+  private LayUpCodec() {}
+
+  @Override
+  public LayUp read(JsonObject object) {
+    object.requiredChoice(TYPE, TYPES);
+    return new TabulatedLayUp(
+        object.text("id"),
+        object.requiredText("name"),
+        object.read(INSERTION_LOSS, BandsCodec.BANDS),
+        object.number(BASE_MASS),
+        includes(object.value(INCLUDES)),
+        object.extras());
+  }
+
+  private static Set<TableContent> includes(JsonValue value) {
+    Set<TableContent> includes = new LinkedHashSet<>();
+    for (JsonValue item : value.items()) {
+      TableContent content = item.choice(TableContent.values(), TableContent::text);
+      if (content == null) {
+        item.missing();
+        value.keep();
+      } else {
+        includes.add(content);
+      }
+    }
+    return includes;
+  }
+
+  @Override
+  public ObjectNode write(LayUp layUp) {
+    TabulatedLayUp table = (TabulatedLayUp) layUp;
+    // a set has no order of its own, and the same vehicle must give the same bytes
+    List<String> includes = table.includes().stream().sorted().map(TableContent::text).toList();
+    JsonBuilder builder =
+        new JsonBuilder()
+            .text("id", table.id())
+            .name("name", table.name())
+            .text(TYPE, TYPES[0])
+            .value(INSERTION_LOSS, table.insertionLoss(), BandsCodec.BANDS)
+            .number(BASE_MASS, table.baseSurfaceMass());
+    if (!includes.isEmpty()) {
+      builder.texts(INCLUDES, includes);
+    }
+    return builder.with(table.extras());
+  }
+}

@@ -1,0 +1,73 @@
+package eddyledger.file;
+
+import com.fasterxml.jackson.databind.JsonNode;
+import com.fasterxml.jackson.databind.node.JsonNodeFactory;
+import com.fasterxml.jackson.databind.node.NullNode;
+import com.fasterxml.jackson.databind.node.ObjectNode;
+import eddyledger.model.ByCondition;
+import java.util.LinkedHashMap;
+import java.util.Map;
+
+/**
+ * A value with its overrides per condition: the value's own object with one key more.
+ *
+ * @param <T> the value
+ */
+final class OverrideCodec<T> {
+  /** The key of the overrides. */
+  static final String KEY = "by_condition";
+
+  private final ValueCodec<T> codec;
+
+  OverrideCodec(ValueCodec<T> codec) {
+    this.codec = codec;
+  }
+
+  /** Reads it; unknown keys beside overrides without a base are kept by the holder. */
+  ByCondition<T> read(JsonValue value, JsonObject holder, String key) {
+    if (!value.isObject()) {
+      return ByCondition.always(codec.read(value));
+    }
+    JsonObject object = value.object();
+    Map<String, T> overrides = overrides(object.value(KEY));
+    boolean onlyOverrides = !object.value(KEY).absent() && !object.hasAny(codec.keys());
+    if (onlyOverrides) {
+      codec.keys().forEach(object::value);
+      holder.keep(key, object.extras());
+      return new ByCondition<>(null, overrides);
+    }
+    return new ByCondition<>(codec.read(value), overrides);
+  }
+
+  private Map<String, T> overrides(JsonValue value) {
+    Map<String, T> overrides = new LinkedHashMap<>();
+    JsonObject object = value.object();
+    for (String condition : object.keys()) {
+      JsonValue override = object.value(condition);
+      if (override.absent()) {
+        override.missing();
+      }
+      overrides.put(condition, codec.read(override));
+    }
+    return overrides;
+  }
+
+  /** Writes it, as short as it can be. */
+  JsonNode write(ByCondition<T> value) {
+    if (value.overrides().isEmpty() && value.base() != null) {
+      return codec.brief(codec.write(value.base()));
+    }
+    ObjectNode overrides = JsonNodeFactory.instance.objectNode();
+    value
+        .overrides()
+        .forEach(
+            (condition, held) -> {
+              JsonNode written = codec.brief(codec.write(held));
+              boolean nothing = written.isMissingNode();
+              overrides.set(condition, nothing ? NullNode.getInstance() : written);
+            });
+    ObjectNode full =
+        value.base() == null ? JsonNodeFactory.instance.objectNode() : codec.write(value.base());
+    return full.set(KEY, overrides);
+  }
+}
