@@ -1,0 +1,55 @@
+package eddyledger.app;
+
+import eddyledger.check.Finding;
+import eddyledger.check.Severity;
+import eddyledger.file.ProjectReader;
+import eddyledger.file.ReadResult;
+import eddyledger.model.Vehicle;
+import java.io.IOException;
+import java.nio.file.AccessDeniedException;
+import java.nio.file.Files;
+import java.nio.file.NoSuchFileException;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Optional;
+
+/** Opens project files. */
+public final class Projects {
+  private final ProjectReader reader;
+
+  /** With a reader of project files. */
+  public Projects(ProjectReader reader) {
+    this.reader = reader;
+  }
+
+  /** Opens a file; whatever goes wrong is among the findings. */
+  public OpenedProject open(Path file) {
+    try {
+      ReadResult result = reader.read(file);
+      Optional<Vehicle> usable = result.fatal() ? Optional.empty() : result.vehicle();
+      return new OpenedProject(file, usable, result.findings());
+    } catch (IOException e) {
+      return new OpenedProject(file, Optional.empty(), List.of(unreadable(file, e)));
+    }
+  }
+
+  private static Finding unreadable(Path file, IOException e) {
+    String why;
+    if (e instanceof NoSuchFileException) {
+      why = "There is no such file.";
+    } else if (e instanceof AccessDeniedException) {
+      why = "The file may not be read.";
+    } else if (Files.isDirectory(file)) {
+      why = "It is a folder, not a file.";
+    } else {
+      why = "The file cannot be read: " + e.getMessage() + ".";
+    }
+    return new Finding(
+        Severity.FATAL,
+        "unreadable-file",
+        "",
+        file.toString(),
+        why,
+        "Check the path and your rights to read it.");
+  }
+}

@@ -1,0 +1,61 @@
+package eddyledger.command;
+
+import eddyledger.app.Projects;
+import eddyledger.app.Tables;
+import java.io.PrintWriter;
+import picocli.CommandLine;
+import picocli.CommandLine.Command;
+
+/** The program's command line with all its commands. */
+@Command(
+    name = "eddyledger",
+    mixinStandardHelpOptions = true,
+    versionProvider = Version.class,
+    description = {
+      "Predicts what the flow over every panel of a vehicle adds to the level at every seat,",
+      "and holds the sum against targets."
+    },
+    footer = {
+      "",
+      "Exit codes: 0 done; 1 done, with findings or a missed target (see --fail-on); 2 the input"
+          + " cannot be used; 64 wrong usage; 70 internal fault."
+    })
+public final class MainCommand implements Runnable {
+  private final CommandLine line;
+
+  /**
+   * The command line.
+   *
+   * @param projects opens project files
+   * @param tables writes tables
+   * @param out where results go
+   * @param err where complaints go
+   */
+  public MainCommand(Projects projects, Tables tables, PrintWriter out, PrintWriter err) {
+    line =
+        new CommandLine(this)
+            .addSubcommand(new CheckCommand(projects))
+            .addSubcommand(new LedgerCommand(projects, tables))
+            .addSubcommand(new TraceCommand(projects, tables));
+    line.setOut(out);
+    line.setErr(err);
+    line.setCaseInsensitiveEnumValuesAllowed(true);
+    line.setParameterExceptionHandler(new UsageFaults());
+    line.setExecutionExceptionHandler(new Complaints());
+    line.setUsageHelpAutoWidth(true);
+  }
+
+  /** Runs the command line and gives its exit code; never throws. */
+  public int run(String... arguments) {
+    int code = line.execute(arguments);
+    line.getOut().flush();
+    line.getErr().flush();
+    return code;
+  }
+
+  /** Without a command there is only help to give. */
+  @Override
+  public void run() {
+    line.usage(line.getOut());
+  }
+}
