@@ -1,10 +1,14 @@
 package eddyledger.command;
 
 import eddyledger.quantity.LevelText;
+import java.math.BigDecimal;
+import java.math.MathContext;
 import java.util.Locale;
 
 /** Numbers of a table as text; a number that is not there is an empty cell. */
 final class Figures {
+  private static final int FOUR_DIGITS = 4;
+
   private Figures() {}
 
   /** A level in dB with one decimal; empty if there is none. */
@@ -38,7 +42,12 @@ final class Figures {
     if (value == Math.rint(value) && size < 1.0e6) {
       return Long.toString((long) value);
     }
-    String format = size >= 1.0e-3 && size < 1.0e6 ? "%.4g" : "%.3e";
-    return String.format(Locale.ROOT, format, value);
+    if (size < 1.0e-3 || size >= 1.0e6) {
+      return String.format(Locale.ROOT, "%.3e", value);
+    }
+    return new BigDecimal(value)
+        .round(new MathContext(FOUR_DIGITS))
+        .stripTrailingZeros()
+        .toPlainString();
   }
 }

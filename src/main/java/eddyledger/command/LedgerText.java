@@ -145,7 +145,7 @@ final class LedgerText {
       level(row.levelA()),
       level(row.level()),
       margin(row.judgement().margin()),
-      choice.words()
+      row.reason().isEmpty() ? choice.words() : choice.words() + "; " + row.reason()
     };
   }
 }

@@ -63,4 +63,11 @@ public record LedgerRow(
     return new LedgerRow(
         id, parent, depth, name, kind, other, choice, meanSquares, Judgement.NONE, status, reason);
   }
+
+  /** The same row with more words in its reason. */
+  LedgerRow noting(String words) {
+    String both = reason.isEmpty() || words.isEmpty() ? reason + words : words + "; " + reason;
+    return new LedgerRow(
+        id, parent, depth, name, kind, way, choice, meanSquares, judgement, status, both);
+  }
 }

@@ -6,6 +6,7 @@ import eddyledger.model.OperatingCondition;
 import eddyledger.model.Panel;
 import eddyledger.model.TreePath;
 import eddyledger.model.Vehicle;
+import eddyledger.physics.Remark;
 import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.LinkedHashMap;
@@ -156,5 +157,18 @@ final class LedgerRun {
   /** The first error finding about an id; empty if there is none. */
   Optional<Finding> error(String id) {
     return resolver.error(id);
+  }
+
+  /** On how many computed panels a wall-pressure spectrum leaves its range in a condition. */
+  long panelsOutOfRange(String spectrumId, String condition) {
+    return panels.stream()
+        .map(path -> outcome(path.node().id(), condition))
+        .filter(outcome -> outcome != null && outcome.result() != null)
+        .flatMap(
+            outcome ->
+                WallPressureBands.spectrum(spectrumId).remarks(outcome.result().layer()).stream()
+                    .filter(remark -> remark.kind() == Remark.Kind.OUT_OF_RANGE)
+                    .limit(1))
+        .count();
   }
 }

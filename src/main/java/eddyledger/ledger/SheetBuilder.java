@@ -83,9 +83,21 @@ final class SheetBuilder {
     List<LedgerRow> range = new ArrayList<>();
     List<Choice> choices = Choice.all();
     for (int c = 1; c < choices.size(); c++) {
-      range.add(total(sum.total(c), choices.get(c).name(), target));
+      LedgerRow row = total(sum.total(c), choices.get(c).name(), target);
+      range.add(row.noting(doubt(choices.get(c), condition.id())));
     }
     return new ReceiverSheet(condition, receiver, rows, range);
+  }
+
+  /** What makes an alternative doubtful here; empty if nothing. */
+  private String doubt(Choice choice, String condition) {
+    if (choice.spectrum() == null) {
+      return "";
+    }
+    long beyond = run.panelsOutOfRange(choice.spectrum(), condition);
+    return beyond == 0
+        ? ""
+        : "outside its range on " + beyond + " of " + run.panels().size() + " panels";
   }
 
   private Optional<Target> overallTarget(String condition, String receiver) {
