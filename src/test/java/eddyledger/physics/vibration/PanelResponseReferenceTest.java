@@ -68,22 +68,17 @@ class PanelResponseReferenceTest {
 
   private static PanelTransfer compute(JsonNode panel, SeparableCrossSpectrum spectrum) {
     JsonNode in = panel.get("inputs");
-    Plate plate =
-        Plate.isotropic(
-                in.get("a").asDouble(),
-                in.get("b").asDouble(),
-                in.get("h").asDouble(),
-                in.get("E").asDouble(),
-                in.get("rho").asDouble(),
-                in.get("nu").asDouble())
-            .withTension(in.get("Nx").asDouble(), in.get("Ny").asDouble());
-    double[] loss = new double[Bands.COUNT];
-    Arrays.fill(loss, in.get("eta").asDouble());
+    double[] loss = Panels.loss(in.get("eta").asDouble());
     double speed = in.get("Uc").asDouble();
     FluidFace cabin = new FluidFace(panel.get("rho0").asDouble(), panel.get("c0").asDouble());
     PanelCase panelCase =
         PanelCase.of(
-            plate, loss, Optional.empty(), Optional.of(cabin), List.of(spectrum), f -> speed);
+            Panels.plate(panel),
+            loss,
+            Optional.empty(),
+            Optional.of(cabin),
+            List.of(spectrum),
+            f -> speed);
     return new PanelResponse(new RadiationCache()).of(panelCase, Progress.NONE);
   }
 
