@@ -60,7 +60,7 @@ public class JointAcceptanceBench {
   /** ∫_0^1 [(1 − u) cos Mu + sin(Mu)/M] f(uL) cos(k_c uL) du. */
   private double quadrature(int mode) {
     double pole = mode * Math.PI;
-    return new IterativeLegendreGaussIntegrator(5, 1e-8, 1e-14, 2, 64)
+    return new IterativeLegendreGaussIntegrator(20, 1e-8, 1e-14, 2, 64)
         .integrate(
             1_000_000,
             u ->

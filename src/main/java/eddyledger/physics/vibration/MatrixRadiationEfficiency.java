@@ -12,9 +12,8 @@ package eddyledger.physics.vibration;
  * rounding.
  *
  * <p>Source: C. E. Wallace, "Radiation resistance of a rectangular panel", J. Acoust. Soc. Am. 51
- * (1972) 946, equation 11, from memory; the reduction of the double area integral by
- * autocorrelation compares with W. L. Li and H. J. Gibeling, J. Sound Vib. 229 (2000) 1213, from
- * memory.
+ * (1972) 946, from memory; the reduction of the double area integral by autocorrelation compares
+ * with W. L. Li and H. J. Gibeling, J. Sound Vib. 229 (2000) 1213, from memory.
  *
  * <p>Range: any mode and wavenumber. Relative error about 1e-10; rounding leaves an absolute error
  * of about 1e-15 at low wavenumbers, which shows at efficiencies below 1e-9. Coupling of modes
