@@ -37,7 +37,7 @@ public final class PanelResponse {
 
   private final RadiationCache cache;
 
-  /** With radiation efficiencies kept in a cache, which may be shared between threads. */
+  /** With radiation efficiencies kept in a cache, which several threads may use at once. */
   public PanelResponse(RadiationCache cache) {
     this.cache = cache;
   }

@@ -1,9 +1,9 @@
 package eddyledger.physics.vibration;
 
 /**
- * Radiation efficiencies of one size of plate, kept and shared: they depend on size and wavenumber,
- * not on the material of the plate, its damping or the air, so that all conditions, both faces and
- * every change of treatment draw on the same numbers.
+ * Radiation efficiencies of one size of plate, kept once for all: they depend on size and
+ * wavenumber, not on the material of the plate, its damping or the air, so that all conditions,
+ * both faces and every change of treatment draw on the same numbers.
  *
  * <p>Formula: σ/k² interpolated from Chebyshev nodes in k, see {@link WavenumberInterval}, with σ
  * at the nodes from the product of {@link MatrixRadiationEfficiency}. Beyond kR = 256 (R the

@@ -56,12 +56,12 @@ class PanelResponseTest {
     for (PanelCase panel : cases) {
       one.add(response.of(panel, Progress.NONE).radiatedPower()[0]);
     }
-    PanelResponse shared = new PanelResponse(new RadiationCache());
+    PanelResponse common = new PanelResponse(new RadiationCache());
     ExecutorService threads = Executors.newFixedThreadPool(2);
     try {
       List<Future<double[]>> two = new ArrayList<>();
       for (PanelCase panel : cases) {
-        two.add(threads.submit(() -> shared.of(panel, Progress.NONE).radiatedPower()[0]));
+        two.add(threads.submit(() -> common.of(panel, Progress.NONE).radiatedPower()[0]));
       }
       for (int i = 0; i < cases.size(); i++) {
         assertThat(two.get(i).get(60, TimeUnit.SECONDS)).isEqualTo(one.get(i));

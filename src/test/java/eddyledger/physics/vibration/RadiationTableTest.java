@@ -120,13 +120,13 @@ class RadiationTableTest {
 
   @Test
   void threadsSeeTheSameBits() throws Exception {
-    RadiationCache shared = new RadiationCache();
+    RadiationCache common = new RadiationCache();
     double[][] alone = new RadiationCache().table(0.6, 0.5).efficiencies(70.0, 14, 11);
     ExecutorService threads = Executors.newFixedThreadPool(4);
     try {
       List<Future<double[][]>> answers = new ArrayList<>();
       for (int i = 0; i < 16; i++) {
-        answers.add(threads.submit(() -> shared.table(0.6, 0.5).efficiencies(70.0, 14, 11)));
+        answers.add(threads.submit(() -> common.table(0.6, 0.5).efficiencies(70.0, 14, 11)));
       }
       for (Future<double[][]> answer : answers) {
         assertThat(answer.get(20, TimeUnit.SECONDS)).isDeepEqualTo(alone);
