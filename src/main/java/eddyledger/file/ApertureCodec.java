@@ -2,7 +2,7 @@ package eddyledger.file;
 
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import eddyledger.model.Aperture;
-import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 
 /** What couples two zones. */
@@ -19,7 +19,8 @@ final class ApertureCodec implements RecordCodec<Aperture> {
   @Override
   public Aperture read(JsonObject object) {
     List<JsonValue> zones = object.value(ZONES).items();
-    if (zones.size() != PAIR) {
+    boolean pair = zones.size() == PAIR;
+    if (!pair) {
       object
           .value(ZONES)
           .wholeFault(
@@ -31,8 +32,8 @@ final class ApertureCodec implements RecordCodec<Aperture> {
     return new Aperture(
         object.text("id"),
         object.requiredText("name"),
-        zones.size() > 0 ? zones.get(0).text() : null,
-        zones.size() > 1 ? zones.get(1).text() : null,
+        pair ? zones.get(0).text() : null,
+        pair ? zones.get(1).text() : null,
         object.requiredNumber(AREA),
         object.read(TRANSMISSION_LOSS, BandsCodec.BANDS),
         object.extras());
@@ -40,13 +41,11 @@ final class ApertureCodec implements RecordCodec<Aperture> {
 
   @Override
   public ObjectNode write(Aperture aperture) {
-    List<String> zones = new ArrayList<>();
-    zones.add(aperture.firstZone());
-    zones.add(aperture.secondZone());
-    return new JsonBuilder()
-        .text("id", aperture.id())
-        .name("name", aperture.name())
-        .texts(ZONES, zones)
+    JsonBuilder builder = new JsonBuilder().text("id", aperture.id()).name("name", aperture.name());
+    if (aperture.firstZone() != null || aperture.secondZone() != null) {
+      builder.texts(ZONES, Arrays.asList(aperture.firstZone(), aperture.secondZone()));
+    }
+    return builder
         .number(AREA, aperture.area())
         .value(TRANSMISSION_LOSS, aperture.transmissionLoss(), BandsCodec.BANDS)
         .with(aperture.extras());

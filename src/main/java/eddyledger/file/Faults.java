@@ -32,6 +32,11 @@ final class Faults {
   /** A value that cannot be read as a whole; nothing else is told of it or of its parts. */
   void whole(JsonValue value, String code, String what, String remedy) {
     value(Severity.ERROR, value, code, what, remedy);
+    enoughOf(value);
+  }
+
+  /** Nothing more is told of a value and its parts. */
+  void enoughOf(JsonValue value) {
     toldWithParts.add(value.place());
   }
 

@@ -112,9 +112,10 @@ final class JsonBuilder {
     kept.forEach(
         (name, value) -> {
           String key = (String) name;
-          if (into.get(key) instanceof ObjectNode nested && value instanceof Map<?, ?> parts) {
+          JsonNode written = into.get(key);
+          if (written instanceof ObjectNode nested && value instanceof Map<?, ?> parts) {
             merge(nested, parts);
-          } else if (!into.has(key)) {
+          } else if (written == null || written.isObject() && written.isEmpty()) {
             into.set(key, FreeJson.write(value));
           }
         });

@@ -65,8 +65,15 @@ final class JsonParsing {
     if (text.isBlank()) {
       return refuse("empty-file", "The file is empty.", "Take it from a copy.");
     }
-    SyntaxFault fault = new SyntaxFault(text, name, faults);
     try (JsonParser parser = mapper.createParser(text)) {
+      return root(parser, new SyntaxFault(text, name, faults));
+    } catch (IOException fromText) {
+      throw new UncheckedIOException("a text in memory cannot fail to be read", fromText);
+    }
+  }
+
+  private Optional<ObjectNode> root(JsonParser parser, SyntaxFault fault) throws IOException {
+    try {
       JsonNode node = mapper.readTree(parser);
       if (!(node instanceof ObjectNode root)) {
         return refuse(
@@ -75,17 +82,14 @@ final class JsonParsing {
             "Check whether it is the right file.");
       }
       fault.rootRead(parser.currentLocation());
-      if (parser.nextToken() != null) {
-        fault.trailing();
-        return Optional.empty();
+      if (parser.nextToken() == null) {
+        return Optional.of(root);
       }
-      return Optional.of(root);
+      fault.trailing();
     } catch (JsonProcessingException broken) {
-      fault.tell(broken);
-      return Optional.empty();
-    } catch (IOException fromText) {
-      throw new UncheckedIOException("a text in memory cannot fail to be read", fromText);
+      fault.tell(broken, parser.currentLocation());
     }
+    return Optional.empty();
   }
 
   private <T> Optional<T> refuse(String code, String what, String remedy) {

@@ -39,9 +39,9 @@ final class SyntaxFault {
   }
 
   /** The text breaks the rules of JSON or passes a limit. */
-  void tell(JsonProcessingException broken) {
+  void tell(JsonProcessingException broken, JsonLocation reached) {
     String words = String.valueOf(broken.getOriginalMessage()).toLowerCase(Locale.ROOT);
-    JsonLocation location = broken.getLocation();
+    JsonLocation location = broken.getLocation() == null ? reached : broken.getLocation();
     if (end != null) {
       trailing();
     } else if (broken instanceof StreamConstraintsException) {

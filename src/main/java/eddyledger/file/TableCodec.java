@@ -55,12 +55,15 @@ final class TableCodec implements RecordCodec<BandTable> {
     List<Double> values = List.of();
     boolean usable = false;
     if (resolution == null) {
-      object
-          .self()
-          .wholeFault(
-              "missing-value",
-              "It is not said how the bands are given.",
-              "Write \"bands\": \"third-octave\", \"octave\" or \"single\".");
+      if (object.value(BANDS).absent()) {
+        object
+            .self()
+            .wholeFault(
+                "missing-value",
+                "It is not said how the bands are given.",
+                "Write \"bands\": \"third-octave\", \"octave\" or \"single\".");
+      }
+      object.self().faults().enoughOf(object.self());
     } else if (resolution == Resolution.SINGLE) {
       first = null;
       values = List.of(object.requiredNumber(VALUE));
