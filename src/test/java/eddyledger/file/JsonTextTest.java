@@ -118,8 +118,7 @@ class JsonTextTest {
             "targets",
             "allowances",
             "tree",
-            "change_log",
-            "");
+            "change_log");
   }
 
   @ParameterizedTest

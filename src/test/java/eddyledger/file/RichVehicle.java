@@ -160,7 +160,7 @@ final class RichVehicle {
             1.5,
             rule,
             evidence("contract"),
-            new Extras(Map.of("note", "target", "pass_rule", Map.of("by", "both")))),
+            new Extras(Map.of("x-note", "target", "pass_rule", Map.of("x-by", "both")))),
         new Target(
             "speech",
             "speech",
@@ -189,7 +189,7 @@ final class RichVehicle {
 
   private static Extras rootExtras() {
     Map<String, Object> extras = new LinkedHashMap<>();
-    extras.put("vehicle", Map.of("x-owner", "works", "settings of later", List.of(1, 2)));
+    extras.put("vehicle", Map.of("x-owner", "works", "x-settings of later", List.of(1, 2)));
     extras.put("x-null", null);
     extras.put("x-numbers", Arrays.asList(1, 5_000_000_000L, 0.1, 17.0, 1.0e-7, null));
     extras.put("x-exact", new BigDecimal("0.10000000000000000000000000000000001"));
@@ -197,7 +197,7 @@ final class RichVehicle {
     extras.put("x-beyond", new BigDecimal("1E+999"));
     extras.put("x-flags", List.of(true, false));
     extras.put("x-deep", Map.of("a", List.of(Map.of("b", List.of())), "c", Map.of()));
-    extras.put("", "empty key");
+    extras.put("x-", "nearly empty key");
     return new Extras(extras);
   }
 }
