@@ -26,6 +26,10 @@ public final class NearMiss {
     String best = null;
     int least = Integer.MAX_VALUE;
     for (String candidate : known.stream().sorted().toList()) {
+      if (Math.abs(candidate.length() - word.length()) > allowed) {
+        // cannot be near, and the distance of very long words takes long
+        continue;
+      }
       int distance = distance(word.toLowerCase(Locale.ROOT), candidate.toLowerCase(Locale.ROOT));
       if (distance < least) {
         least = distance;

@@ -2,6 +2,7 @@ package eddyledger.check;
 
 import eddyledger.model.Allowance;
 import eddyledger.model.Construction;
+import eddyledger.model.JudgedBands;
 import eddyledger.model.LayUp;
 import eddyledger.model.OtherSource;
 import eddyledger.model.PlateConstruction;
@@ -37,6 +38,7 @@ final class Parts {
       String place = "other_sources[" + i + "].levels_dB";
       parts.needed(source.levels(), source.id(), place);
       findings.bands(Limit.LEVEL, source.levels(), source.id(), place);
+      parts.noOctaves(source.levels(), source.id(), place);
     }
     for (int i = 0; i < vehicle.targets().size(); i++) {
       parts.target(vehicle.targets().get(i), "targets[" + i + "]");
@@ -126,6 +128,18 @@ final class Parts {
     findings.required(Limit.RESERVE, target.reserve(), target.id(), place + ".reserve_dB");
     findings.required(
         Limit.RESERVE, target.rule().tolerance(), target.id(), place + ".pass_rule.tolerance_dB");
+  }
+
+  private void noOctaves(JudgedBands levels, String id, String place) {
+    if (levels != null && levels.best().interpolated()) {
+      findings.add(
+          Severity.ERROR,
+          "octave-levels",
+          id,
+          place,
+          "Levels are given in octaves, which cannot be split into thirds.",
+          "Give them in one-third octaves.");
+    }
   }
 
   private void needed(Object value, String id, String place) {

@@ -15,6 +15,7 @@ public final class VehicleCheck {
     Surroundings.check(vehicle, findings);
     Parts.check(vehicle, findings);
     Nodes.check(vehicle, findings);
+    Coverage.check(vehicle, findings);
     Completeness.check(vehicle, findings);
     return List.copyOf(findings.all());
   }

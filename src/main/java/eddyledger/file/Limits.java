@@ -16,7 +16,7 @@ record Limits(long bytes, int depth, int textLength, int numberLength, int keyLe
 
   /** Far above any vehicle, far below what a computer cannot hold. */
   static Limits ofBytes(long bytes) {
-    return new Limits(bytes, 200, 100_000, 1_000, 1_000, 5_000_000L);
+    return new Limits(bytes, 200, 100_000, 1_000, 1_000, 2_000_000L);
   }
 
   StreamReadConstraints constraints() {

@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import eddyledger.check.Finding;
 import eddyledger.check.Severity;
+import java.util.Collections;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -170,7 +171,7 @@ class FaultyFileTest {
   @ParameterizedTest
   @ValueSource(strings = {"27", "29", "0"})
   void aSpectrumOfTheWrongLength(int count) {
-    String values = "[" + String.join(",", java.util.Collections.nCopies(count, "1")) + "]";
+    String values = "[" + String.join(",", Collections.nCopies(count, "1")) + "]";
     Finding finding = only("zones[1].absorption_area_m2.values", values, "spectrum-length");
     assertThat(finding.place()).isEqualTo("zones[1].absorption_area_m2");
     assertThat(finding.what()).contains("There are " + count + " third-octave values from 25 Hz");

@@ -25,7 +25,10 @@ final class RichParts {
         new Tension(
             null,
             new ByCondition<>(Judged.of(1000.0), Map.of("cruise", RichVehicle.judged(1200.0))),
-            new ByCondition<>(null, Map.of("cruise", Judged.of(800.0), "climb.2", Judged.of(0.0))),
+            new ByCondition<>(
+                null,
+                Map.of(
+                    "cruise", Judged.of(800.0), "climb.2", Judged.of(0.0), "rest", Judged.of(1.0))),
             new Extras(Map.of("x-note", "tension", "across_N_per_m", Map.of("x-later", 1))));
     return List.of(
         new PlateConstruction(

@@ -143,7 +143,15 @@ final class RichVehicle {
             "store",
             1.0e-2,
             null,
-            new ByCondition<>(null, Map.of("cruise", RichValues.single())),
+            new ByCondition<>(
+                null,
+                Map.of(
+                    "cruise",
+                    RichValues.single(),
+                    "climb.2",
+                    RichValues.octaves(),
+                    "rest",
+                    RichValues.thirds(2.0))),
             Extras.NONE));
   }
 

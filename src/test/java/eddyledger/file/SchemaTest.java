@@ -8,11 +8,20 @@ import com.networknt.schema.InputFormat;
 import com.networknt.schema.Schema;
 import com.networknt.schema.SchemaRegistry;
 import com.networknt.schema.SpecificationVersion;
+import eddyledger.model.BandTable;
+import eddyledger.model.CrossSpectrumChoice;
+import eddyledger.model.EvidenceGrade;
+import eddyledger.model.PassRule;
+import eddyledger.model.Rating;
+import eddyledger.model.TableContent;
+import eddyledger.model.ValueKind;
 import eddyledger.model.VehicleBuilder;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.List;
+import java.util.function.Function;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -80,9 +89,24 @@ class SchemaTest {
   @Test
   void theWordsAreThoseOfTheProgram() {
     JsonNode defs = SmallFile.parse(text(FILE)).get("$defs");
-    for (String rating : List.of("overall-a", "sil-500-1k-2k-4k")) {
-      assertThat(defs.toString()).contains('"' + rating + '"');
-    }
+    assertWords(defs.at("/grade"), EvidenceGrade.values(), EvidenceGrade::text);
+    assertWords(defs.at("/valueKind"), ValueKind.values(), ValueKind::text);
+    assertWords(defs.at("/target/properties/rating"), Rating.values(), Rating::text);
+    JsonNode rule = defs.at("/target/properties/pass_rule/properties");
+    assertWords(rule.get("rounding"), PassRule.Rounding.values(), PassRule.Rounding::text);
+    assertWords(rule.get("across"), PassRule.Across.values(), PassRule.Across::text);
+    JsonNode carried = defs.at("/oneCrossSpectrum/properties/rule");
+    assertWords(carried, CrossSpectrumChoice.Rule.values(), CrossSpectrumChoice.Rule::text);
+    JsonNode includes = defs.at("/layUp/properties/includes/items");
+    assertWords(includes, TableContent.values(), TableContent::text);
+    JsonNode bands = defs.at("/tableObject/properties/bands");
+    assertWords(bands, BandTable.Resolution.values(), BandTable.Resolution::text);
+  }
+
+  private static <E> void assertWords(JsonNode schema, E[] values, Function<E, String> word) {
+    List<String> words = new ArrayList<>();
+    schema.get("enum").forEach(node -> words.add(node.textValue()));
+    assertThat(words).containsExactlyInAnyOrderElementsOf(Stream.of(values).map(word).toList());
   }
 
   @ParameterizedTest
@@ -129,5 +153,7 @@ class SchemaTest {
     SmallFile file = new SmallFile().with("zones[0].colour", "{\"a\": [1]}");
     file.with("tree[0].children[0].later", "1").with("vehicle.loss_factor.note", "\"n\"");
     assertThat(faults(file.root().toString())).isEmpty();
+    assertThat(new SchemaKeys(SmallFile.parse(text(FILE))).undescribedIn(file.root()))
+        .contains(".zones[0].colour", ".tree[0].children[0].later", ".vehicle.loss_factor.note");
   }
 }

@@ -9,6 +9,7 @@ import com.fasterxml.jackson.databind.json.JsonMapper;
 import com.fasterxml.jackson.databind.node.ArrayNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import eddyledger.check.Finding;
+import eddyledger.model.Vehicle;
 import java.io.IOException;
 import java.io.InputStream;
 import java.nio.charset.StandardCharsets;
@@ -16,7 +17,7 @@ import java.util.List;
 import java.util.Objects;
 
 /** A small project file without faults, in which a test changes what it looks at. */
-final class SmallFile {
+public final class SmallFile {
   /** Numbers are passed on as they are written, however large. */
   private static final JsonMapper MAPPER =
       JsonMapper.builder().enable(DeserializationFeature.USE_BIG_DECIMAL_FOR_FLOATS).build();
@@ -24,7 +25,7 @@ final class SmallFile {
   private final ObjectNode root = (ObjectNode) parse(text());
 
   /** The file as it stands, without faults. */
-  static String text() {
+  public static String text() {
     try (InputStream in = SmallFile.class.getResourceAsStream("/file/small.eddyledger")) {
       return new String(Objects.requireNonNull(in).readAllBytes(), StandardCharsets.UTF_8);
     } catch (IOException missing) {
@@ -33,7 +34,7 @@ final class SmallFile {
   }
 
   /** Sets the value at a place such as {@code zones[0].volume_m3} to a piece of JSON. */
-  SmallFile with(String place, String json) {
+  public SmallFile with(String place, String json) {
     JsonNode holder = holder(place);
     String last = last(place);
     if (holder instanceof ArrayNode list) {
@@ -50,7 +51,7 @@ final class SmallFile {
   }
 
   /** Takes the property at a place away. */
-  SmallFile without(String place) {
+  public SmallFile without(String place) {
     assertThat(((ObjectNode) holder(place)).remove(last(place))).as(place).isNotNull();
     return this;
   }
@@ -71,23 +72,28 @@ final class SmallFile {
   }
 
   /** Reads the changed file. */
-  ReadResult read() {
+  public ReadResult read() {
     return new ProjectReader().read(root.toString(), "small.eddyledger");
   }
 
+  /** The vehicle of the changed file. */
+  public Vehicle vehicle() {
+    return read().vehicle().orElseThrow();
+  }
+
   /** The one finding of the changed file. */
-  Finding onlyFinding() {
+  public Finding onlyFinding() {
     List<Finding> findings = read().findings();
     assertThat(findings).hasSize(1);
     return findings.get(0);
   }
 
   /** The changed file as a tree. */
-  ObjectNode root() {
+  public ObjectNode root() {
     return root;
   }
 
-  static JsonNode parse(String json) {
+  public static JsonNode parse(String json) {
     try {
       return MAPPER.readTree(json);
     } catch (JsonProcessingException broken) {
