@@ -6,7 +6,9 @@ import com.fasterxml.jackson.databind.node.NullNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import eddyledger.model.ByCondition;
 import java.util.LinkedHashMap;
+import java.util.List;
 import java.util.Map;
+import java.util.stream.Collectors;
 
 /**
  * A value with its overrides per condition: the value's own object with one key more.
@@ -66,8 +68,17 @@ final class OverrideCodec<T> {
               boolean nothing = written.isMissingNode();
               overrides.set(condition, nothing ? NullNode.getInstance() : written);
             });
-    ObjectNode full =
-        value.base() == null ? JsonNodeFactory.instance.objectNode() : codec.write(value.base());
-    return full.set(KEY, overrides);
+    ObjectNode full = JsonNodeFactory.instance.objectNode();
+    if (value.base() == null) {
+      return full.set(KEY, overrides);
+    }
+    // unknown properties come after all that are known
+    Map<Boolean, List<Map.Entry<String, JsonNode>>> known =
+        codec.write(value.base()).properties().stream()
+            .collect(Collectors.partitioningBy(entry -> codec.keys().contains(entry.getKey())));
+    known.get(true).forEach(entry -> full.set(entry.getKey(), entry.getValue()));
+    full.set(KEY, overrides);
+    known.get(false).forEach(entry -> full.set(entry.getKey(), entry.getValue()));
+    return full;
   }
 }

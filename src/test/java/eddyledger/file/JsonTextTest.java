@@ -121,6 +121,18 @@ class JsonTextTest {
             "change_log");
   }
 
+  @Test
+  void unknownPropertiesComeAfterTheKnownOnes() {
+    List<String> lines = ProjectWriter.toText(RichVehicle.vehicle()).lines().toList();
+    for (int i = 0; i + 1 < lines.size(); i++) {
+      String line = lines.get(i);
+      int indent = line.indexOf('"');
+      if (indent > 2 && line.startsWith("\"x-", indent) && line.endsWith(",")) {
+        assertThat(lines.get(i + 1).strip()).as(line).startsWith("\"x-");
+      }
+    }
+  }
+
   @ParameterizedTest
   @ValueSource(doubles = {Double.NaN, Double.POSITIVE_INFINITY})
   void whatIsNoNumberIsNeverWritten(double number) {
