@@ -10,6 +10,7 @@ import eddyledger.quantity.Bands;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.Map;
 
 /** What one piece of a panel does that is given by a measured level difference. */
 final class MeasuredPhysics {
@@ -26,12 +27,13 @@ final class MeasuredPhysics {
     JudgedBands stated = input.data().absorptionArea();
     BandSpectrum area = stated == null ? cabin.absorption(panel.zone()) : stated.best().spectrum();
     BandSpectrum difference = input.data().levelDifference().best().spectrum();
-    WallPressureBands chosen = WallPressureBands.of(input.spectrum(), layer);
     List<Choice> choices = Choice.all();
+    Map<String, WallPressureBands> walls =
+        WallPressureBands.under(layer, choices, input.spectrum());
+    WallPressureBands chosen = walls.get(input.spectrum());
     double[][] power = new double[choices.size()][Bands.COUNT];
     for (int c = 0; c < choices.size(); c++) {
-      String spectrum = choices.get(c).spectrum(input.spectrum());
-      double[] wall = WallPressureBands.of(spectrum, layer).meanSquares();
+      double[] wall = walls.get(choices.get(c).spectrum(input.spectrum())).meanSquares();
       for (int band = 0; band < Bands.COUNT; band++) {
         boolean known = difference.has(band) && area.has(band);
         power[c][band] =

@@ -16,6 +16,7 @@ import eddyledger.quantity.Progress;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 
 /** Runs the physics of one piece of a panel, for all choices of models at once. */
@@ -42,14 +43,14 @@ final class PanelPhysics {
     Plate plate = plate(input.plate());
     double convection = input.convectionRatio() * layer.edgeSpeed();
     PanelTransfer transfer = transfer(input, plate, convection, crosses);
-    WallPressureBands chosen = WallPressureBands.of(input.spectrum(), layer);
+    Map<String, WallPressureBands> walls =
+        WallPressureBands.under(layer, choices, input.spectrum());
+    WallPressureBands chosen = walls.get(input.spectrum());
     double[][] power = new double[choices.size()][];
     double[] velocity = null;
     for (int c = 0; c < choices.size(); c++) {
       Choice choice = choices.get(c);
-      double[] slices =
-          WallPressureBands.slices(
-              WallPressureBands.spectrum(choice.spectrum(input.spectrum())), layer);
+      double[] slices = walls.get(choice.spectrum(input.spectrum())).slices();
       int which = crosses.indexOf(choice.cross(input.cross()));
       power[c] = transfer.bandPower(slices, which);
       if (c == 0) {

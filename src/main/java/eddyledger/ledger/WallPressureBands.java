@@ -7,16 +7,20 @@ import eddyledger.physics.wallpressure.ButterworthCrossSpectrum;
 import eddyledger.physics.wallpressure.WallPressureSpectra;
 import eddyledger.physics.wallpressure.WallPressureSpectrum;
 import eddyledger.quantity.Bands;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 
 /**
  * The wall pressure under a layer in the 28 bands.
  *
  * @param densities one-sided spectral density at the exact mid-band frequency, Pa²/Hz, shape [28]
  * @param meanSquares mean square in the band, Pa², shape [28], by log-equal slices
+ * @param slices density at the geometric centre of every slice, Pa²/Hz, shape [slices]
  * @param remarks what the spectrum says of its use
  */
-record WallPressureBands(double[] densities, double[] meanSquares, List<Remark> remarks) {
+record WallPressureBands(
+    double[] densities, double[] meanSquares, double[] slices, List<Remark> remarks) {
   /** How bands are cut; the panel's response is cut the same way, so the two belong together. */
   static final BandSlices SLICES = BandSlices.forOrder(ButterworthCrossSpectrum.HIGHEST_ORDER);
 
@@ -31,16 +35,27 @@ record WallPressureBands(double[] densities, double[] meanSquares, List<Remark> 
     for (int i = 0; i < slices.length; i++) {
       meanSquares[i / SLICES.perBand()] += slices[i] * SLICES.width(i);
     }
-    return new WallPressureBands(densities, meanSquares, spectrum.remarks(layer));
+    return new WallPressureBands(densities, meanSquares, slices, spectrum.remarks(layer));
   }
 
-  /** Spectral density at the geometric centre of every slice, Pa²/Hz, shape [slices]. */
-  static double[] slices(WallPressureSpectrum spectrum, BoundaryLayer layer) {
+  private static double[] slices(WallPressureSpectrum spectrum, BoundaryLayer layer) {
     double[] slices = new double[SLICES.count()];
     for (int i = 0; i < slices.length; i++) {
       slices[i] = spectrum.spectralDensity(SLICES.centre(i), layer);
     }
     return slices;
+  }
+
+  /**
+   * The wall pressure under a layer after every spectrum that a choice of models asks for, by id.
+   */
+  static Map<String, WallPressureBands> under(
+      BoundaryLayer layer, List<Choice> choices, String chosen) {
+    Map<String, WallPressureBands> bands = new HashMap<>();
+    for (Choice choice : choices) {
+      bands.computeIfAbsent(choice.spectrum(chosen), id -> of(id, layer));
+    }
+    return bands;
   }
 
   static WallPressureSpectrum spectrum(String id) {

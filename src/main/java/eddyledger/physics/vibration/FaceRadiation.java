@@ -10,7 +10,7 @@ final class FaceRadiation {
   private final FluidFace fluid;
   private RadiationBlock block;
   private int interval = Integer.MIN_VALUE;
-  private double[] sigma = new double[0];
+  private double[] weights;
 
   FaceRadiation(RadiationTable table, FluidFace fluid) {
     this.table = table;
@@ -18,29 +18,25 @@ final class FaceRadiation {
   }
 
   /**
-   * Reads σ at an angular frequency; {@link #row} then gives it.
+   * Turns to an angular frequency; {@link #read} then gives σ there.
    *
    * @param omega rad/s, not above the one before
    * @param modesAlong M, not above the one before
    * @param modesAcross N, not above the one before
    */
-  void read(double omega, int modesAlong, int modesAcross) {
+  void turnTo(double omega, int modesAlong, int modesAcross) {
     double wavenumber = omega / fluid.soundSpeed();
     int index = table.interval(wavenumber);
     if (index != interval || index == WavenumberInterval.SINGLE) {
       block = table.block(wavenumber, modesAlong, modesAcross);
       interval = index;
     }
-    int count = modesAcross * block.modesAlong();
-    if (sigma.length < count) {
-      sigma = new double[count];
-    }
-    block.combine(wavenumber, table.diagonal(), count, sigma);
+    weights = block.weights(wavenumber, table.diagonal());
   }
 
-  /** Copies σ_mn of one n (from 0), m = 1 .. count. */
-  void row(int n, int count, double[] into) {
-    System.arraycopy(sigma, n * block.modesAlong(), into, 0, count);
+  /** Reads σ_mn of one n (from 0), the modes m from one index (from 0) up to before another. */
+  void read(int n, int from, int to, double[] into) {
+    block.combine(weights, n * block.modesAlong() + from, to - from, into, from);
   }
 
   /** ρc of the fluid, Pa s/m. */

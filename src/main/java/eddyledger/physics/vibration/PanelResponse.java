@@ -35,6 +35,11 @@ import java.util.List;
 public final class PanelResponse {
   private static final int MANY_MODES = 20_000;
 
+  /** Squares of the frequency ratios between which a mode is damped by the outside's own σ. */
+  private static final double NEAR_BELOW = 0.64;
+
+  private static final double NEAR_ABOVE = 1.44;
+
   private final RadiationCache cache;
 
   /** With radiation efficiencies kept in a cache, which several threads may use at once. */
@@ -116,13 +121,12 @@ public final class PanelResponse {
                 spectrum.acrossFlow(omega, speed), panel.plate().width(), kept.length);
       }
       double load = omega / panel.plate().surfaceMass();
-      double cabinLoad = read(cabin, omega, kept, modesAlong) * load;
-      double outsideLoad = read(outside, omega, kept, modesAlong) * load;
+      double cabinLoad = turn(cabin, omega, kept, modesAlong) * load;
+      double outsideLoad = turn(outside, omega, kept, modesAlong) * load;
       sum.clear();
       double[] acrossRow = new double[along.length];
       for (int n = 0; n < kept.length; n++) {
-        copy(cabin, n, kept[n], sum.cabin());
-        copy(outside, n, kept[n], sum.outside());
+        radiation(n, kept[n], omega);
         for (int i = 0; i < acrossRow.length; i++) {
           acrossRow[i] = across[i][n];
         }
@@ -146,19 +150,35 @@ public final class PanelResponse {
       }
     }
 
-    /** Reads the slice's radiation efficiencies; ρc of the face, 0 if there is none. */
-    private static double read(FaceRadiation face, double omega, int[] kept, int modesAlong) {
+    /** Turns a face to the slice's frequency; ρc of the face, 0 if there is none. */
+    private static double turn(FaceRadiation face, double omega, int[] kept, int modesAlong) {
       if (face == null) {
         return 0.0;
       }
-      face.read(omega, modesAlong, kept.length);
+      face.turnTo(omega, modesAlong, kept.length);
       return face.impedance();
     }
 
-    private static void copy(FaceRadiation face, int n, int count, double[] into) {
-      if (face != null) {
-        face.row(n, count, into);
+    /**
+     * Reads σ of a row. The outside face only damps, and damping only counts near resonance:
+     * farther off the cabin's σ stands in for the outside's, which differs by the air alone.
+     */
+    private void radiation(int n, int count, double omega) {
+      if (cabin != null) {
+        cabin.read(n, 0, count, sum.cabin());
       }
+      if (outside == null) {
+        return;
+      }
+      int from = 0;
+      int to = count;
+      if (cabin != null) {
+        System.arraycopy(sum.cabin(), 0, sum.outside(), 0, count);
+        double[] squares = grid.squares()[n];
+        from = Math.min(count, ModeGrid.below(squares, NEAR_BELOW * omega * omega));
+        to = Math.min(count, ModeGrid.below(squares, NEAR_ABOVE * omega * omega));
+      }
+      outside.read(n, from, to, sum.outside());
     }
 
     private static List<Remark> remarks(int[] summed) {

@@ -12,8 +12,8 @@ import java.util.concurrent.CompletableFuture;
  * <p>Checked by {@code RadiationTableTest}.
  */
 public final class RadiationCache {
-  /** Bound unless another is given, bytes. */
-  public static final long USUAL_BYTES = 256L << 20;
+  private static final long LEAST_USUAL_BYTES = 256L << 20;
+  private static final int USUAL_SHARE = 4;
 
   /**
    * What a block is known by.
@@ -40,9 +40,11 @@ public final class RadiationCache {
   private final long highestBytes;
   private long bytes;
 
-  /** With the usual bound. */
+  /**
+   * With the usual bound: 256 MB, or a quarter of the memory the program may use if that is more.
+   */
   public RadiationCache() {
-    this(USUAL_BYTES);
+    this(Math.max(LEAST_USUAL_BYTES, Runtime.getRuntime().maxMemory() / USUAL_SHARE));
   }
 
   /**

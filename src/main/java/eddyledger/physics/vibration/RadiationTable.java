@@ -40,11 +40,10 @@ public final class RadiationTable implements RadiationEfficiency {
     Require.atLeastOne(modesAlong, "number of modes along");
     Require.atLeastOne(modesAcross, "number of modes across");
     RadiationBlock block = block(wavenumber, modesAlong, modesAcross);
-    double[] flat = new double[modesAcross * block.modesAlong()];
-    block.combine(wavenumber, diagonal, flat.length, flat);
+    double[] weights = block.weights(wavenumber, diagonal);
     double[][] sigma = new double[modesAcross][modesAlong];
     for (int n = 0; n < modesAcross; n++) {
-      System.arraycopy(flat, n * block.modesAlong(), sigma[n], 0, modesAlong);
+      block.combine(weights, n * block.modesAlong(), modesAlong, sigma[n], 0);
     }
     return sigma;
   }

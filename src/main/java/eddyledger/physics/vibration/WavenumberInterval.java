@@ -4,8 +4,8 @@ package eddyledger.physics.vibration;
  * The fixed stretches of x = kR (R the diagonal of the plate) over which σ/k² is interpolated, and
  * the Chebyshev nodes in each.
  *
- * <p>Stretches: 0-1, 1-2, 2-4, 4-8, 8-16, 16-32, then 32 long to 256. σ/k² is an entire function of
- * k of exponential type R, so the number of nodes needed depends on the length of the stretch only;
+ * <p>Stretches: 0-1, 1-2, 2-4, 4-8, 8-16, then 16 long to 256. σ/k² is an entire function of k of
+ * exponential type R, so the number of nodes needed depends on the length of the stretch only;
  * doubling at the low end keeps the relative error small although σ/k² falls as k⁴ there. Beyond
  * 256 a stretch would need more nodes than a computation has slices in it, and each wavenumber
  * stands for itself.
@@ -19,11 +19,11 @@ record WavenumberInterval(double[] nodes, double middle, double halfLength) {
   static final int SINGLE = -1;
 
   private static final double END = 256.0;
-  private static final double EVEN_FROM = 32.0;
-  private static final int DOUBLINGS = 6;
+  private static final double EVEN_FROM = 16.0;
+  private static final int DOUBLINGS = 5;
 
   /** Relative error below 1e-6, mostly 1e-7, by comparison with the exact product. */
-  private static final int[] COUNTS = {10, 8, 9, 10, 13, 19, 29};
+  private static final int[] COUNTS = {10, 8, 9, 10, 13, 19};
 
   /** Index of the stretch that holds x = kR, or {@link #SINGLE}. */
   static int index(double x) {

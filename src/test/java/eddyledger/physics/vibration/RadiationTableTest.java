@@ -45,7 +45,7 @@ class RadiationTableTest {
     }
   }
 
-  /** Beyond kR = 256 each wavenumber stands for itself. */
+  /** Beyond kR = 256 each wavenumber stands for itself, kept in single precision. */
   @Test
   void highWavenumbersAreTheProductItself() {
     RadiationCache cache = new RadiationCache();
@@ -54,14 +54,25 @@ class RadiationTableTest {
     double[][] exact = new MatrixRadiationEfficiency(0.9, 0.45).efficiencies(k, 5, 4);
     for (int n = 0; n < 4; n++) {
       for (int m = 0; m < 5; m++) {
-        assertThat(kept[n][m]).isCloseTo(exact[n][m], within(1e-14 * exact[n][m]));
+        assertThat(kept[n][m]).isCloseTo(exact[n][m], within(1e-7 * exact[n][m]));
       }
     }
-    assertThat(cache.bytes()).isEqualTo(8 * 5 * 4);
+    assertThat(cache.bytes()).isEqualTo(4 * 5 * 4);
   }
 
   @ParameterizedTest
-  @CsvSource({"0.0, 0", "0.999, 0", "1.0, 1", "1.99, 1", "2.0, 2", "31.9, 5", "32.0, 6", "64.0, 7"})
+  @CsvSource({
+    "0.0, 0",
+    "0.999, 0",
+    "1.0, 1",
+    "1.99, 1",
+    "2.0, 2",
+    "15.9, 4",
+    "16.0, 5",
+    "31.9, 5",
+    "32.0, 6",
+    "64.0, 8"
+  })
   void stretchesFollowOneAnother(double x, int index) {
     assertThat(WavenumberInterval.index(x)).isEqualTo(index);
     WavenumberInterval interval = WavenumberInterval.of(index);
