@@ -14,6 +14,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import java.util.stream.IntStream;
 
 /** What a run has to say about zones and receivers: where the diffuse balance is weak. */
@@ -114,14 +115,23 @@ final class CabinFindings {
             "Do not read differences between seats in these bands.");
       }
     }
-    Optional<String> diffuse =
+    OptionalDouble most =
         IntStream.range(0, Bands.COUNT)
             .mapToDouble(band -> cabin.meanAbsorption(zone.id(), band))
             .filter(value -> !Double.isNaN(value))
-            .boxed()
-            .max(Double::compare)
-            .flatMap(Sabine::remark)
-            .map(remark -> remark.text());
+            .max();
+    if (most.orElse(0.0) > 1.0) {
+      add(
+          Severity.WARNING,
+          "absorption-above-surface",
+          zone.id(),
+          place,
+          "Its absorption area is larger than its inner surface; where direct sound is counted,"
+              + " nothing is left for the diffuse field.",
+          "Correct the absorption area or the inner surface.");
+    }
+    Optional<String> diffuse =
+        most.stream().boxed().findFirst().flatMap(Sabine::remark).map(remark -> remark.text());
     if (diffuse.isPresent()) {
       add(
           Severity.NOTE,

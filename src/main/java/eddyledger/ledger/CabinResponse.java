@@ -91,7 +91,7 @@ final class CabinResponse {
       perWatt[band] =
           Double.isNaN(distance)
               ? transfer.diffuse(zones.get(zone))
-              : transfer.withDirect(meanAbsorption(zone, band), area, distance);
+              : transfer.withDirect(Math.min(1.0, meanAbsorption(zone, band)), area, distance);
     }
     return perWatt;
   }
@@ -115,7 +115,10 @@ final class CabinResponse {
         .orElse(Double.NaN);
   }
 
-  /** Mean absorption coefficient of a zone in a band; NaN where unknown. */
+  /**
+   * Mean absorption coefficient of a zone in a band; NaN where unknown, above 1 where absorption
+   * and surface do not belong together.
+   */
   double meanAbsorption(String zone, int band) {
     int z = zones.get(zone);
     return surface[z] == null

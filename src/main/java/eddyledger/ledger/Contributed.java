@@ -4,6 +4,7 @@ import eddyledger.quantity.BandSpectrum;
 import eddyledger.quantity.Bands;
 import eddyledger.quantity.Decibels;
 import eddyledger.quantity.OverallLevel;
+import java.util.Arrays;
 import java.util.List;
 
 /**
@@ -16,12 +17,14 @@ public record Contributed(BandSpectrum meanSquares, Status status) {
 
   static Contributed of(List<LedgerRow> rows) {
     double[] sum = new double[Bands.COUNT];
+    Arrays.fill(sum, Double.NaN);
     boolean whole = true;
     for (LedgerRow row : rows) {
       whole &= row.status() == Status.OK;
       for (int band = 0; band < Bands.COUNT; band++) {
         if (row.meanSquares().has(band)) {
-          sum[band] += row.meanSquares().value(band);
+          double soFar = Double.isNaN(sum[band]) ? 0.0 : sum[band];
+          sum[band] = soFar + row.meanSquares().value(band);
         }
       }
     }

@@ -74,7 +74,9 @@ record Contribution(double[] meanSquares, Status status, String reason) {
     if (reasons.isEmpty()) {
       return new Contribution(sum, Status.OK, "");
     }
-    return new Contribution(sum, anything ? Status.PARTIAL : Status.MISSING, shorten(reasons));
+    boolean failed = parts.stream().anyMatch(part -> part.contribution().status() == Status.FAILED);
+    Status nothing = failed ? Status.FAILED : Status.MISSING;
+    return new Contribution(sum, anything ? Status.PARTIAL : nothing, shorten(reasons));
   }
 
   private static String shorten(List<String> reasons) {

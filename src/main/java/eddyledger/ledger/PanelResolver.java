@@ -46,10 +46,15 @@ final class PanelResolver {
     vehicle.constructions().forEach(it -> constructions.put(it.id(), it));
     vehicle.layUps().forEach(it -> layUps.put(it.id(), it));
     for (Finding finding : findings) {
-      if (finding.severity().atLeast(Severity.ERROR)) {
+      if (finding.severity().atLeast(Severity.ERROR) && concernsLevels(finding)) {
         errors.putIfAbsent(finding.subject(), finding);
       }
     }
+  }
+
+  /** A faulty allowance or an unknown supplier is named on a panel, but changes no level of it. */
+  private static boolean concernsLevels(Finding finding) {
+    return !finding.place().startsWith("allowances[") && !finding.place().endsWith(".supplier");
   }
 
   /** The first error finding about an id; empty if there is none. */

@@ -14,7 +14,6 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.Optional;
 
 /** What a run has to say beyond the description: formulas out of range, panels that failed. */
 final class RunFindings {
@@ -73,26 +72,26 @@ final class RunFindings {
             panel.id(),
             path.place(),
             "In condition \"" + condition + "\" it cannot be computed: " + failure.reason() + ".",
-            "Correct its input; totals above it are partial until then." + suggestion(panel)));
+            "Correct its input; totals above it are partial until then."
+                + suggestion(run.resolved(panel.id(), condition))));
   }
 
-  private String suggestion(Panel panel) {
-    return Optional.ofNullable(panel.settings().wallPressure())
-        .map(choice -> choice.base())
-        .filter(choice -> choice.model() != null)
-        .filter(choice -> WallPressureSpectra.byId(choice.model()).isEmpty())
-        .map(
-            choice ->
-                NearMiss.of(
-                    choice.model(),
-                    WallPressureSpectra.all().stream().map(WallPressureSpectrum::id).toList()))
-        .orElse("");
+  private static String suggestion(ResolvedPanel panel) {
+    String spectrum =
+        panel.input() != null ? panel.input().spectrum() : panel.measured().spectrum();
+    return WallPressureSpectra.byId(spectrum).isPresent()
+        ? ""
+        : NearMiss.of(
+            spectrum, WallPressureSpectra.all().stream().map(WallPressureSpectrum::id).toList());
   }
 
   private void outOfRange(Topic topic, List<Met> met) {
     Met first = met.get(0);
     int more = met.size() - 1;
-    String others = more == 0 ? "" : " (and " + more + " more panels alike)";
+    String others =
+        more == 0
+            ? ""
+            : " (and " + more + (more == 1 ? " more panel alike)" : " more panels alike)");
     all.add(
         new Finding(
             Severity.WARNING,

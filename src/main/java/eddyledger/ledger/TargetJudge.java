@@ -43,11 +43,21 @@ final class TargetJudge {
   }
 
   private static boolean worse(TargetResult here, TargetResult other) {
-    // a receiver without a level is the worst news of all: nothing is known of it
+    if (rank(here) != rank(other)) {
+      return rank(here) < rank(other);
+    }
     if (Double.isNaN(other.margin())) {
       return false;
     }
     return Double.isNaN(here.margin()) || here.margin() < other.margin();
+  }
+
+  /** Over is certain whatever is unknown elsewhere; the unknown is worse news than what holds. */
+  private static int rank(TargetResult result) {
+    if (result.missed()) {
+      return 0;
+    }
+    return result.state() == null ? 1 : 2;
   }
 
   private TargetResult result(

@@ -61,9 +61,16 @@ final class TreeSum {
   private List<Part> parts(List<Node> children, int choice) {
     List<Part> parts = new ArrayList<>();
     for (Node child : children) {
-      parts.add(new Part(child.id(), nodes.get(child.id()).get(choice)));
+      // the silence of an empty section is no knowledge of the bands its neighbours lack
+      if (!empty(child)) {
+        parts.add(new Part(child.id(), nodes.get(child.id()).get(choice)));
+      }
     }
     return parts;
+  }
+
+  private static boolean empty(Node node) {
+    return node instanceof Section section && section.children().stream().allMatch(TreeSum::empty);
   }
 
   /** The sum at a section, or the contribution of a panel, under the chosen models. */
