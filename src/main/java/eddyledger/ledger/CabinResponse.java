@@ -26,6 +26,7 @@ final class CabinResponse {
   private final BandSpectrum[] absorption;
   private final Double[] surface;
   private final ZoneBalance[] balances = new ZoneBalance[Bands.COUNT];
+  private final double[][][] diffuse;
   private final double impedance;
 
   /**
@@ -47,6 +48,23 @@ final class CabinResponse {
     for (int band = 0; band < Bands.COUNT; band++) {
       balances[band] = balance(vehicle, band);
     }
+    diffuse = diffuse(count);
+  }
+
+  /** Pa²/W between zones, shape [receiving zone][source zone][28]. */
+  private double[][][] diffuse(int count) {
+    double[][][] all = new double[count][count][Bands.COUNT];
+    for (int band = 0; band < Bands.COUNT; band++) {
+      for (int r = 0; r < count; r++) {
+        for (int z = 0; z < count; z++) {
+          all[r][z][band] =
+              balances[band] == null
+                  ? Double.NaN
+                  : new ReceiverTransfer(balances[band], r).diffuse(z);
+        }
+      }
+    }
+    return all;
   }
 
   private ZoneBalance balance(Vehicle vehicle, int band) {
@@ -80,25 +98,21 @@ final class CabinResponse {
    * @param area area of one piece, m²; NaN where unknown, which takes the direct sound away
    */
   double[] perWatt(Receiver receiver, String zone, String panel, double area) {
+    int from = zones.get(zone);
+    int at = zones.get(receiver.zone());
     double distance = distance(receiver, zone, panel, area);
-    double[] perWatt = new double[Bands.COUNT];
+    double[] perWatt = diffuse[at][from].clone();
+    if (Double.isNaN(distance)) {
+      return perWatt;
+    }
     for (int band = 0; band < Bands.COUNT; band++) {
-      if (balances[band] == null) {
-        perWatt[band] = Double.NaN;
-        continue;
+      if (balances[band] != null) {
+        double absorbed = Math.min(1.0, meanAbsorption(zone, band));
+        perWatt[band] =
+            new ReceiverTransfer(balances[band], at).withDirect(absorbed, area, distance);
       }
-      ReceiverTransfer transfer = new ReceiverTransfer(balances[band], zones.get(receiver.zone()));
-      perWatt[band] =
-          Double.isNaN(distance)
-              ? transfer.diffuse(zones.get(zone))
-              : transfer.withDirect(Math.min(1.0, meanAbsorption(zone, band)), area, distance);
     }
     return perWatt;
-  }
-
-  /** Pa² at a receiver per watt without any direct sound, shape [28]. */
-  double[] diffusePerWatt(Receiver receiver, String zone) {
-    return perWatt(receiver, zone, "", Double.NaN);
   }
 
   /**

@@ -26,8 +26,14 @@ public record Choice(String name, String words, Orders orders, Rule rule, String
   public static final Choice CHOSEN =
       new Choice("chosen", "as chosen panel by panel", null, null, null);
 
+  private static final List<Choice> ALL = gather();
+
   /** The chosen models first, then every alternative of the model range. */
   public static List<Choice> all() {
+    return ALL;
+  }
+
+  private static List<Choice> gather() {
     List<Choice> all = new ArrayList<>();
     all.add(CHOSEN);
     Rule width = Rule.HALF_POWER_WIDTH;

@@ -6,7 +6,6 @@ import eddyledger.model.OperatingCondition;
 import eddyledger.model.Panel;
 import eddyledger.model.TreePath;
 import eddyledger.model.Vehicle;
-import eddyledger.physics.Remark;
 import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.LinkedHashMap;
@@ -161,14 +160,12 @@ final class LedgerRun {
 
   /** On how many computed panels a wall-pressure spectrum leaves its range in a condition. */
   long panelsOutOfRange(String spectrumId, String condition) {
-    return panels.stream()
-        .map(path -> outcome(path.node().id(), condition))
-        .filter(outcome -> outcome != null && outcome.result() != null)
-        .flatMap(
-            outcome ->
-                WallPressureBands.spectrum(spectrumId).remarks(outcome.result().layer()).stream()
-                    .filter(remark -> remark.kind() == Remark.Kind.OUT_OF_RANGE)
-                    .limit(1))
-        .count();
+    long count = 0;
+    for (TreePath path : panels) {
+      PanelOutcome outcome = outcome(path.node().id(), condition);
+      boolean known = outcome != null && outcome.result() != null;
+      count += known && outcome.result().beyond().contains(spectrumId) ? 1 : 0;
+    }
+    return count;
   }
 }

@@ -57,6 +57,7 @@ final class MeasuredPhysics {
         power,
         new int[Bands.COUNT],
         null,
-        remarks);
+        remarks,
+        WallPressureBands.beyond(walls));
   }
 }

@@ -76,7 +76,8 @@ final class PanelPhysics {
             plate.meanStiffness(),
             plate.criticalFrequency(input.cabin().soundSpeed()),
             transfer.firstModeFrequency()),
-        remarks);
+        remarks,
+        WallPressureBands.beyond(walls));
   }
 
   private PanelTransfer transfer(

@@ -3,6 +3,7 @@ package eddyledger.ledger;
 import eddyledger.physics.Remark;
 import eddyledger.physics.flow.BoundaryLayer;
 import java.util.List;
+import java.util.Set;
 
 /**
  * What one piece of a panel does, computed or from a measurement. All arrays are per band, shape
@@ -19,6 +20,7 @@ import java.util.List;
  * @param modes modes summed in the band; 0 for a measured panel
  * @param plate key numbers of the plate; null for a measured panel
  * @param remarks what the formulas say of their use
+ * @param beyond ids of the wall-pressure spectra, chosen or alternative, that leave their range
  */
 record PanelResult(
     BoundaryLayer layer,
@@ -29,7 +31,8 @@ record PanelResult(
     double[][] power,
     int[] modes,
     PlateNumbers plate,
-    List<Remark> remarks) {
+    List<Remark> remarks,
+    Set<String> beyond) {
 
   /**
    * Key numbers of a plate.

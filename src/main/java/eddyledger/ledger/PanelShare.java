@@ -51,6 +51,10 @@ record PanelShare(double[] power, int count, double[] pathFactor, double[] perWa
     return InsertionLoss.powers(ones, insertionLoss(panel));
   }
 
+  private PanelShare withPower(double[] other) {
+    return new PanelShare(other, count, pathFactor, perWatt);
+  }
+
   /** Mean square at the receiver, Pa². */
   double[] meanSquares() {
     double[] meanSquares = new double[Bands.COUNT];
@@ -73,8 +77,9 @@ record PanelShare(double[] power, int count, double[] pathFactor, double[] perWa
     PanelResult result = run.outcome(panelId, condition).result();
     CabinResponse cabin = run.cabin(condition);
     List<Contribution> contributions = new ArrayList<>();
+    PanelShare chosen = of(panel, result, 0, cabin, receiver);
     for (int c = 0; c < choices; c++) {
-      double[] meanSquares = of(panel, result, c, cabin, receiver).meanSquares();
+      double[] meanSquares = chosen.withPower(result.power()[c]).meanSquares();
       contributions.add(
           Contribution.of(
               meanSquares,

@@ -10,6 +10,8 @@ import eddyledger.quantity.Bands;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
+import java.util.stream.Collectors;
 
 /**
  * The wall pressure under a layer in the 28 bands.
@@ -56,6 +58,17 @@ record WallPressureBands(
       bands.computeIfAbsent(choice.spectrum(chosen), id -> of(id, layer));
     }
     return bands;
+  }
+
+  /** The ids among some spectra that leave their range. */
+  static Set<String> beyond(Map<String, WallPressureBands> walls) {
+    return walls.entrySet().stream()
+        .filter(
+            wall ->
+                wall.getValue().remarks().stream()
+                    .anyMatch(remark -> remark.kind() == Remark.Kind.OUT_OF_RANGE))
+        .map(Map.Entry::getKey)
+        .collect(Collectors.toUnmodifiableSet());
   }
 
   static WallPressureSpectrum spectrum(String id) {
