@@ -14,10 +14,14 @@ import eddyledger.ledger.RowKind;
 import eddyledger.ledger.Status;
 import eddyledger.ledger.TargetResult;
 import eddyledger.ledger.Way;
+import eddyledger.quantity.LevelText;
+import eddyledger.quantity.SpeechInterferenceLevel;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.Collectors;
 
 /** The ledger of one receiver and condition as aligned text. */
 final class LedgerText {
@@ -45,6 +49,7 @@ final class LedgerText {
             + ")");
     lines.add("");
     lines.addAll(tree());
+    lines.add(speech());
     lines.add("");
     lines.addAll(targets());
     lines.add("");
@@ -74,6 +79,17 @@ final class LedgerText {
         "",
         flow.status() == Status.OK ? "" : flow.status().text());
     return table.lines();
+  }
+
+  /** The speech interference levels of the total, each named by its octaves. */
+  private String speech() {
+    return Arrays.stream(SpeechInterferenceLevel.values())
+        .map(
+            kind ->
+                String.join("-", kind.octaves())
+                    + " Hz "
+                    + LevelText.text(sheet.total().speechInterference(kind)))
+        .collect(Collectors.joining(", ", "speech interference level of the total, dB: ", ""));
   }
 
   /** The row of the sheet with the least margin. */

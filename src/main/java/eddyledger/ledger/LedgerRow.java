@@ -3,6 +3,7 @@ package eddyledger.ledger;
 import eddyledger.quantity.BandSpectrum;
 import eddyledger.quantity.Decibels;
 import eddyledger.quantity.OverallLevel;
+import eddyledger.quantity.SpeechInterferenceLevel;
 
 /**
  * One row of the ledger at one receiver in one condition. Immutable.
@@ -50,6 +51,11 @@ public record LedgerRow(
   /** Unweighted overall level, dB; NaN if a band is missing. */
   public double level() {
     return Decibels.pressureLevel(OverallLevel.linearMeanSquare(meanSquares.toArray()));
+  }
+
+  /** Speech interference level, dB; NaN if a band it needs is missing. */
+  public double speechInterference(SpeechInterferenceLevel kind) {
+    return kind.ofThirds(levels()).orElse(Double.NaN);
   }
 
   /** The same row with another judgement. */

@@ -100,13 +100,9 @@ final class TargetJudge {
     return switch (rating) {
       case OVERALL_A -> row.levelA();
       case OVERALL_LINEAR -> row.level();
-      case SIL_500_2K -> sil(SpeechInterferenceLevel.THREE_BANDS_500_TO_2000, row);
-      case SIL_1K_4K -> sil(SpeechInterferenceLevel.THREE_BANDS_1000_TO_4000, row);
-      case SIL_500_4K -> sil(SpeechInterferenceLevel.FOUR_BANDS_500_TO_4000, row);
+      case SIL_500_2K -> row.speechInterference(SpeechInterferenceLevel.THREE_BANDS_500_TO_2000);
+      case SIL_1K_4K -> row.speechInterference(SpeechInterferenceLevel.THREE_BANDS_1000_TO_4000);
+      case SIL_500_4K -> row.speechInterference(SpeechInterferenceLevel.FOUR_BANDS_500_TO_4000);
     };
-  }
-
-  private static double sil(SpeechInterferenceLevel kind, LedgerRow row) {
-    return kind.ofThirds(row.levels()).orElse(Double.NaN);
   }
 }
