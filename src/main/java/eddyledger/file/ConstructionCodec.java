@@ -2,6 +2,7 @@ package eddyledger.file;
 
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import eddyledger.model.Construction;
+import eddyledger.model.Extras;
 import eddyledger.model.PlateConstruction;
 import eddyledger.model.Tension;
 
@@ -36,6 +37,11 @@ final class ConstructionCodec implements RecordCodec<Construction> {
         object.extras());
   }
 
+  /** The type, unless another one was read that this version does not know: that one is kept. */
+  private static String typeUnless(Extras extras) {
+    return extras.properties().containsKey(TYPE) ? null : TYPES[0];
+  }
+
   @Override
   public ObjectNode write(Construction construction) {
     PlateConstruction plate = (PlateConstruction) construction;
@@ -43,7 +49,7 @@ final class ConstructionCodec implements RecordCodec<Construction> {
         new JsonBuilder()
             .text("id", plate.id())
             .name("name", plate.name())
-            .text(TYPE, TYPES[0])
+            .text(TYPE, typeUnless(plate.extras()))
             .number(THICKNESS, plate.thickness())
             .number(YOUNGS_MODULUS, plate.youngsModulus())
             .number(DENSITY, plate.density())

@@ -1,6 +1,7 @@
 package eddyledger.file;
 
 import com.fasterxml.jackson.databind.node.ObjectNode;
+import eddyledger.model.Extras;
 import eddyledger.model.LayUp;
 import eddyledger.model.TableContent;
 import eddyledger.model.TabulatedLayUp;
@@ -46,6 +47,11 @@ final class LayUpCodec implements RecordCodec<LayUp> {
     return includes;
   }
 
+  /** The type, unless another one was read that this version does not know: that one is kept. */
+  private static String typeUnless(Extras extras) {
+    return extras.properties().containsKey(TYPE) ? null : TYPES[0];
+  }
+
   @Override
   public ObjectNode write(LayUp layUp) {
     TabulatedLayUp table = (TabulatedLayUp) layUp;
@@ -55,7 +61,7 @@ final class LayUpCodec implements RecordCodec<LayUp> {
         new JsonBuilder()
             .text("id", table.id())
             .name("name", table.name())
-            .text(TYPE, TYPES[0])
+            .text(TYPE, typeUnless(table.extras()))
             .value(INSERTION_LOSS, table.insertionLoss(), BandsCodec.BANDS)
             .number(BASE_MASS, table.baseSurfaceMass());
     if (!includes.isEmpty()) {

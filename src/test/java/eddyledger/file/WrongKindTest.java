@@ -46,6 +46,18 @@ class WrongKindTest {
   }
 
   @ParameterizedTest
+  @ValueSource(strings = {"constructions[0].type", "lay_ups[0].type"})
+  void aTypeThatIsNotKnownIsToldAndKept(String place) {
+    SmallFile file = new SmallFile().with(place, "\"woven\"");
+    assertThat(file.read().findings()).extracting(Finding::place).contains(place);
+    String saved = ProjectWriter.toText(file.read().vehicle().orElseThrow());
+    assertThat(saved).contains("\"type\": \"woven\"");
+    assertThat(new ProjectReader().read(saved, "saved").findings())
+        .extracting(Finding::place)
+        .contains(place);
+  }
+
+  @ParameterizedTest
   @ValueSource(strings = {"7", "null", "\"cabin\"", "[]"})
   void aMemberThatIsNoObjectKeepsThePositionsOfTheOthers(String json) {
     SmallFile file = new SmallFile().with("zones[0]", json).with("zones[1].volume_m3", "-1");
