@@ -20,7 +20,7 @@ package eddyledger.physics.vibration;
  * <p>Checked by {@code RadiationTableTest}.
  */
 public final class RadiationTable implements RadiationEfficiency {
-  private static final double CLASS_STEP = 1.25;
+  private static final double CLASS_STEP = 1.1;
 
   private final RadiationCache cache;
   private final double length;
