@@ -25,6 +25,11 @@ final class Complaints implements IExecutionExceptionHandler {
       err.println(e.getMessage());
       return ExitCode.UNUSABLE;
     }
+    return fault(e, err);
+  }
+
+  /** Says that the program itself is at fault, and where the report is. */
+  static int fault(Throwable e, PrintWriter err) {
     err.println("Something went wrong inside the program; your files are as they were.");
     err.println(new FaultReport().write(e));
     return ExitCode.FAULT;

@@ -47,6 +47,7 @@ final class LedgerCommand implements Callable<Integer> {
 
   @Override
   public Integer call() {
+    project.spare(csv, spec);
     Session session = Session.open(projects, project);
     List<ReceiverSheet> sheets = which.among(session.ledger());
     PrintWriter out = spec.commandLine().getOut();

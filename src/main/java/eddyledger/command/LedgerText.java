@@ -161,7 +161,7 @@ final class LedgerText {
       level(row.levelA()),
       level(row.level()),
       margin(row.judgement().margin()),
-      row.reason().isEmpty() ? choice.words() : choice.words() + "; " + row.reason()
+      row.reason().isEmpty() ? choice.words() : choice.words() + ": " + row.reason()
     };
   }
 }

@@ -47,10 +47,19 @@ public final class MainCommand implements Runnable {
 
   /** Runs the command line and gives its exit code; never throws. */
   public int run(String... arguments) {
-    int code = line.execute(arguments);
+    int code = execute(arguments);
     line.getOut().flush();
     line.getErr().flush();
     return code;
+  }
+
+  private int execute(String... arguments) {
+    try {
+      return line.execute(arguments);
+    } catch (Error e) {
+      // the parser hands on exceptions only
+      return Complaints.fault(e, line.getErr());
+    }
   }
 
   /** Without a command there is only help to give. */

@@ -1,7 +1,11 @@
 package eddyledger.command;
 
+import java.io.IOException;
+import java.nio.file.Files;
 import java.nio.file.Path;
+import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
+import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Parameters;
 
 /** What every command that reads a project takes. */
@@ -17,4 +21,25 @@ final class ProjectArguments {
           "What ends a finished command with exit code 1: errors, errors and warnings, or errors"
               + " and missed targets (default: ${DEFAULT-VALUE}).")
   FailOn failOn;
+
+  /**
+   * Sees to it that a table is not written over the project.
+   *
+   * @param table where the table goes; null if none is written
+   * @throws ParameterException if that is the project file itself
+   */
+  void spare(Path table, CommandSpec spec) {
+    if (table != null && isFile(table)) {
+      throw new ParameterException(
+          spec.commandLine(), table + " is the project itself; name another file for the table.");
+    }
+  }
+
+  private boolean isFile(Path other) {
+    try {
+      return Files.isSameFile(file, other);
+    } catch (IOException notThere) {
+      return false;
+    }
+  }
 }

@@ -56,6 +56,7 @@ final class TraceCommand implements Callable<Integer> {
 
   @Override
   public Integer call() {
+    project.spare(csv, spec);
     Session session = Session.open(projects, project);
     List<Node> panels =
         TreePath.of(session.ledger().vehicle()).stream()
@@ -77,6 +78,8 @@ final class TraceCommand implements Callable<Integer> {
       tables.writeTrace(trace, csv);
       out.println("Written: " + csv);
     }
-    return trace.hasValue() ? project.failOn.exitCode(session.findings()) : ExitCode.FINDINGS;
+    return trace.hasValue()
+        ? project.failOn.exitCode(session.ledger(), session.findings())
+        : ExitCode.FINDINGS;
   }
 }

@@ -23,8 +23,7 @@ public record Choice(String name, String words, Orders orders, Rule rule, String
   public record Orders(int along, int across) {}
 
   /** What the lead chose, panel by panel. */
-  public static final Choice CHOSEN =
-      new Choice("chosen", "as chosen panel by panel", null, null, null);
+  public static final Choice CHOSEN = new Choice("chosen", "as chosen", null, null, null);
 
   private static final List<Choice> ALL = gather();
 

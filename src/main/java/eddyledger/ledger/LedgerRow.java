@@ -18,7 +18,7 @@ import eddyledger.quantity.SpeechInterferenceLevel;
  * @param meanSquares mean-square pressure per band, Pa²; NaN where missing
  * @param judgement target or allowance and margin
  * @param status whether the value is whole
- * @param reason why it is not; empty if it is
+ * @param reason why it is not whole; on totals also the models that were chosen and their doubts
  */
 public record LedgerRow(
     String id,
@@ -72,7 +72,7 @@ public record LedgerRow(
 
   /** The same row with more words in its reason. */
   LedgerRow noting(String words) {
-    String both = reason.isEmpty() || words.isEmpty() ? reason + words : words + "; " + reason;
+    String both = reason.isEmpty() || words.isEmpty() ? reason + words : reason + "; " + words;
     return new LedgerRow(
         id, parent, depth, name, kind, way, choice, meanSquares, judgement, status, both);
   }

@@ -78,7 +78,8 @@ final class SheetBuilder {
     TreeSum sum = sums.get(new SheetKey(condition.id(), receiver.id()));
     Optional<Target> target = overallTarget(condition.id(), receiver.id());
     List<LedgerRow> rows = new ArrayList<>();
-    rows.add(total(sum.total(0), Choice.CHOSEN.name(), target));
+    LedgerRow chosen = total(sum.total(0), Choice.CHOSEN.name(), target);
+    rows.add(chosen.noting(ChosenModels.words(run, condition.id())));
     rows.addAll(new SheetRows(vehicle, condition, receiver, judge).rows(sum));
     List<LedgerRow> range = new ArrayList<>();
     List<Choice> choices = Choice.all();
