@@ -3,6 +3,7 @@ package eddyledger.app;
 import eddyledger.check.Finding;
 import eddyledger.check.Severity;
 import eddyledger.file.ProjectReader;
+import eddyledger.file.ProjectWriter;
 import eddyledger.file.ReadResult;
 import eddyledger.model.Vehicle;
 import java.io.IOException;
@@ -31,6 +32,24 @@ public final class Projects {
     } catch (IOException e) {
       return new OpenedProject(file, Optional.empty(), List.of(unreadable(file, e)));
     }
+  }
+
+  /**
+   * Saves a vehicle; the file is whole before and after, whatever happens.
+   *
+   * @throws WriteFailure if the file cannot be written; an old one is then as it was
+   */
+  public void save(Vehicle vehicle, Path file) {
+    try {
+      ProjectWriter.save(vehicle, file);
+    } catch (IOException e) {
+      throw WriteFailure.of(file, e);
+    }
+  }
+
+  /** What there is to say of a vehicle's description, with places as its file would have them. */
+  public List<Finding> findings(Vehicle vehicle) {
+    return reader.read(ProjectWriter.toText(vehicle), vehicle.id()).findings();
   }
 
   private static Finding unreadable(Path file, IOException e) {

@@ -6,7 +6,6 @@ import eddyledger.file.TraceCsv;
 import eddyledger.ledger.ReceiverSheet;
 import eddyledger.ledger.Trace;
 import java.io.IOException;
-import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
 import java.util.List;
 
@@ -36,16 +35,8 @@ public final class Tables {
   private static void write(String text, Path file) {
     try {
       TextFile.replace(file, text);
-    } catch (NoSuchFileException e) {
-      throw new WriteFailure(
-          file + " cannot be written: there is no such folder. Make it, or name another.", e);
     } catch (IOException e) {
-      throw new WriteFailure(
-          file
-              + " cannot be written: "
-              + e.getMessage()
-              + ". Close it elsewhere, check your rights, or name another file.",
-          e);
+      throw WriteFailure.of(file, e);
     }
   }
 }

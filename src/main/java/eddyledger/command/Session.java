@@ -1,5 +1,6 @@
 package eddyledger.command;
 
+import eddyledger.app.Computation;
 import eddyledger.app.OpenedProject;
 import eddyledger.app.Projects;
 import eddyledger.check.Finding;
@@ -8,10 +9,7 @@ import eddyledger.ledger.LedgerCache;
 import eddyledger.ledger.LedgerOptions;
 import eddyledger.ledger.UnusableVehicle;
 import eddyledger.quantity.Progress;
-import java.util.ArrayList;
-import java.util.LinkedHashSet;
 import java.util.List;
-import java.util.Set;
 
 /**
  * A project opened and computed for one command.
@@ -35,16 +33,9 @@ record Session(Ledger ledger, List<Finding> findings) {
     LedgerOptions options = new LedgerOptions(threads, Progress.NONE, new LedgerCache());
     try {
       Ledger ledger = Ledger.of(project.vehicle().get(), options);
-      return new Session(ledger, together(project.findings(), ledger.findings()));
+      return new Session(ledger, Computation.together(project.findings(), ledger.findings()));
     } catch (UnusableVehicle e) {
-      throw new UnusableInput(together(project.findings(), e.findings()));
+      throw new UnusableInput(Computation.together(project.findings(), e.findings()));
     }
-  }
-
-  /** What the reader said of a place is not said again by the computation. */
-  private static List<Finding> together(List<Finding> read, List<Finding> computed) {
-    Set<Finding> all = new LinkedHashSet<>(read);
-    all.addAll(computed);
-    return new ArrayList<>(all);
   }
 }

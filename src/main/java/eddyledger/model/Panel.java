@@ -36,4 +36,9 @@ public record Panel(
   public Panel withSettings(Settings others) {
     return new Panel(id, name, count, others, measured, evidence, extras);
   }
+
+  /** The same panel under another name. */
+  public Panel withName(String other) {
+    return new Panel(id, other, count, settings, measured, evidence, extras);
+  }
 }

@@ -21,4 +21,14 @@ public record Section(String id, String name, Settings settings, List<Node> chil
   public Section withChildren(List<Node> others) {
     return new Section(id, name, settings, others, extras);
   }
+
+  /** The same section with other settings. */
+  public Section withSettings(Settings others) {
+    return new Section(id, name, others, children, extras);
+  }
+
+  /** The same section under another name. */
+  public Section withName(String other) {
+    return new Section(id, other, settings, children, extras);
+  }
 }
