@@ -1,11 +1,11 @@
-package eddyledger.command;
+package eddyledger.check;
 
 import java.util.List;
 
-/** The cautions that stand under every printed ledger and trace. */
-final class Cautions {
+/** The cautions that stand on every output. */
+public final class Cautions {
   /** The short form, as lines. */
-  static final List<String> SHORT =
+  public static final List<String> SHORT =
       List.of(
           "Budget figures for engineering use. Not evidence of compliance, hearing safety, fire,",
           "glazing, structural or airworthiness approval. Conditions and uncertainty as stated.",
