@@ -42,6 +42,17 @@ final class Nodes {
             "The measured level difference is missing.",
             "Enter it per band, or take the measurement away.");
       }
+      if (panel.measured().absorptionArea() == null) {
+        findings.add(
+            Severity.WARNING,
+            "absorption-assumed",
+            panel.id(),
+            at + ".absorption_area_m2",
+            "The absorption area of the room it was measured in is not given, and that of the"
+                + " panel's zone as described is taken, so that absorption added to the zone does"
+                + " not lower this panel's diffuse sound.",
+            "Enter the absorption area at the time of the measurement.");
+      }
       findings.bands(
           Limit.LOSS, panel.measured().levelDifference(), panel.id(), at + ".level_difference_dB");
       findings.bands(

@@ -101,7 +101,9 @@ final class TraceBuilder {
             panel.input() == null
                 ? "measured level difference D: 10^(-D/10) A/(4 rho c)"
                 : "sum over modes of joint acceptance, radiation efficiency and resonance",
-            ""));
+            absorptionAssumed(panel)
+                ? "A of the measurement was not given: that of zone " + panel.zone() + " is taken"
+                : ""));
     steps.add(factor("n", "identical pieces", "", constant(share.count()), "count of the panel"));
     steps.add(
         TraceStep.banded(
@@ -168,6 +170,10 @@ final class TraceBuilder {
             "10 lg p²/(20 µPa)²",
             ""));
     return steps;
+  }
+
+  private static boolean absorptionAssumed(ResolvedPanel panel) {
+    return panel.measured() != null && panel.measured().data().absorptionArea() == null;
   }
 
   private static String answer(ResolvedPanel panel, CabinResponse cabin, Receiver receiver) {

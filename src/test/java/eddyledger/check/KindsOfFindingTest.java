@@ -182,6 +182,15 @@ class KindsOfFindingTest {
   }
 
   @Test
+  void aMeasurementWithoutTheAbsorptionAreaOfItsRoom() {
+    String place = "tree[0].children[1].measured.absorption_area_m2";
+    SmallFile file = new SmallFile().without(place);
+    assertOnly(file, "absorption-assumed", place, "door");
+    assertThat(only(file).severity()).isEqualTo(Severity.WARNING);
+    assertThat(only(file).what()).contains("absorption added to the zone does not lower");
+  }
+
+  @Test
   void levelsAreNotGivenInOctaves() {
     String octaves = "{\"bands\": \"octave\", \"first\": \"63\", \"values\": [50, 50]}";
     String place = "other_sources[0].levels_dB";

@@ -4,8 +4,12 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
 import eddyledger.ledger.TraceStep.Role;
+import eddyledger.model.Extras;
+import eddyledger.model.MeasuredPanel;
 import eddyledger.model.OperatingCondition;
+import eddyledger.model.Panel;
 import eddyledger.model.Receiver;
+import eddyledger.model.Vehicle;
 import eddyledger.quantity.BandSpectrum;
 import eddyledger.quantity.Bands;
 import java.util.ArrayList;
@@ -141,6 +145,29 @@ class TraceTest {
     assertThat(told(step(trace("quarter-glass", "road", "driver"), "Uc/Ue")))
         .contains("set on the panel");
     assertThat(step(trace("roof", "flight", "driver"), "IL").note()).isEmpty();
+  }
+
+  @Test
+  void anAbsorptionAreaThatWasNotMeasuredIsNoted() {
+    assertThat(step(trace(SampleTree.MEASURED, "road", "passenger"), "W1/p²").note()).isEmpty();
+    Vehicle vehicle =
+        Edits.panel(
+            SampleVehicle.vehicle(),
+            SampleTree.MEASURED,
+            panel ->
+                new Panel(
+                    panel.id(),
+                    panel.name(),
+                    panel.count(),
+                    panel.settings(),
+                    new MeasuredPanel(panel.measured().levelDifference(), null, Extras.NONE),
+                    panel.evidence(),
+                    panel.extras()));
+    Ledger ledger = Ledger.of(vehicle);
+    Trace trace = ledger.trace(SampleTree.MEASURED, "road", "passenger").orElseThrow();
+    assertThat(step(trace, "W1/p²").note())
+        .isEqualTo("A of the measurement was not given: that of zone rear is taken");
+    assertThat(step(trace("roof", "road", "passenger"), "W1/p²").note()).isEmpty();
   }
 
   @Test
