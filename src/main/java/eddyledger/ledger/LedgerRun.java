@@ -19,6 +19,7 @@ import java.util.Set;
 final class LedgerRun {
   private final Vehicle vehicle;
   private final LedgerOptions options;
+  private final LevelErrors errors;
   private final PanelResolver resolver;
   private final List<TreePath> panels;
   private final List<Finding> findings;
@@ -34,7 +35,8 @@ final class LedgerRun {
   LedgerRun(Vehicle vehicle, List<Finding> described, LedgerOptions options) {
     this.vehicle = vehicle;
     this.options = options;
-    resolver = new PanelResolver(vehicle, described);
+    errors = new LevelErrors(vehicle, described);
+    resolver = new PanelResolver(vehicle, errors);
     findings = new ArrayList<>(described);
     panels = TreePath.of(vehicle).stream().filter(path -> path.node() instanceof Panel).toList();
   }
@@ -70,7 +72,7 @@ final class LedgerRun {
   }
 
   private void condition(OperatingCondition condition) {
-    Optional<Finding> error = resolver.error(condition.id());
+    Optional<Finding> error = errors.about(condition.id());
     if (error.isPresent()) {
       conditionFailures.put(condition.id(), failed(error.get()));
       return;
@@ -79,13 +81,13 @@ final class LedgerRun {
     conditions.put(condition.id(), state);
     Optional<Finding> cabinError =
         vehicle.zones().stream()
-            .map(zone -> resolver.error(zone.id()))
+            .map(zone -> errors.about(zone.id()))
             .flatMap(Optional::stream)
             .findFirst()
             .or(
                 () ->
                     vehicle.apertures().stream()
-                        .map(aperture -> resolver.error(aperture.id()))
+                        .map(aperture -> errors.about(aperture.id()))
                         .flatMap(Optional::stream)
                         .findFirst());
     if (cabinError.isPresent()) {
@@ -150,12 +152,12 @@ final class LedgerRun {
 
   /** Why the receiver cannot have a level; empty if it can. */
   Optional<Finding> receiverError(String receiver) {
-    return resolver.error(receiver);
+    return errors.about(receiver);
   }
 
   /** The first error finding about an id; empty if there is none. */
   Optional<Finding> error(String id) {
-    return resolver.error(id);
+    return errors.about(id);
   }
 
   /** On how many computed panels a wall-pressure spectrum leaves its range in a condition. */

@@ -1,22 +1,42 @@
 package eddyledger.ledger;
 
+import eddyledger.check.Finding;
 import eddyledger.model.Held;
+import java.util.ArrayList;
 import java.util.LinkedHashMap;
+import java.util.List;
 import java.util.Map;
-import java.util.Set;
-import java.util.TreeSet;
+import java.util.Optional;
 
-/** Where each resolved value of a panel comes from. Filled by one thread while resolving. */
+/**
+ * Where each value comes from that a panel is computed with in a condition, and whether one of them
+ * is faulty. Filled by one thread while resolving.
+ */
 final class Origins {
+  private final LevelErrors errors;
+  private final String panel;
+  private final String condition;
   private final Map<String, String> words = new LinkedHashMap<>();
-  private final Set<String> holders = new TreeSet<>();
+  private final List<Optional<Finding>> found = new ArrayList<>();
   private String construction = "";
 
-  /** Notes where a value is set and gives the value on. */
-  <T> T note(String key, Held<T> held) {
+  /** Of a panel in a condition, by their ids. */
+  Origins(LevelErrors errors, String panel, String condition) {
+    this.errors = errors;
+    this.panel = panel;
+    this.condition = condition;
+  }
+
+  /** Notes where a setting is set and gives its value on; null where nobody set it. */
+  <T> T note(String key, Optional<Held<T>> setting) {
+    if (setting.isEmpty()) {
+      found.add(errors.at(panel, key, condition, false));
+      return null;
+    }
+    Held<T> held = setting.get();
     String where = held.own() ? "set on the panel" : "from " + held.holder();
     words.put(key, held.override() ? where + ", for this condition" : where);
-    holders.add(held.holder());
+    found.add(errors.at(held.holder(), key, condition, held.override()));
     return held.value();
   }
 
@@ -25,9 +45,14 @@ final class Origins {
     words.put(key, "default, nobody set it");
   }
 
-  /** Notes an object that the panel refers to. */
+  /** Notes a property of the panel itself. */
+  void usesOwn(String key) {
+    found.add(errors.at(panel, key));
+  }
+
+  /** Notes an object that the panel refers to and uses as a whole. */
   void uses(String id) {
-    holders.add(id);
+    found.add(errors.about(id));
   }
 
   /** Notes the construction the panel refers to. */
@@ -46,8 +71,8 @@ final class Origins {
     return words.getOrDefault(key, "");
   }
 
-  /** Ids of everything the panel's values come from. */
-  Set<String> holders() {
-    return holders;
+  /** The first error about a value that is used; empty if there is none. */
+  Optional<Finding> error() {
+    return found.stream().flatMap(Optional::stream).findFirst();
   }
 }

@@ -61,8 +61,8 @@ final class RunFindings {
 
   private void failed(Panel panel, TreePath path, String condition, Failure failure) {
     // what the check has already said of the panel is not said twice
-    boolean known = run.error(panel.id()).isPresent() || run.failure(condition).isPresent();
-    if (known || run.resolved(panel.id(), condition).failure() != null) {
+    boolean told = run.resolved(panel.id(), condition).failure() != null;
+    if (told || run.failure(condition).isPresent()) {
       return;
     }
     all.add(
