@@ -3,7 +3,8 @@ package eddyledger.ledger;
 /**
  * How a row stands against what it may have.
  *
- * @param target target in dB(A); NaN if there is none
+ * @param target overall target in dB(A), of several the one with the least margin; NaN if there is
+ *     none
  * @param reserve reserve in dB; NaN if there is no target
  * @param allowance what the row may have in dB(A): the target less its reserve, or the allowance
  *     entered; NaN if there is none

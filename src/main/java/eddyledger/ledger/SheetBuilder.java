@@ -11,6 +11,7 @@ import eddyledger.model.Vehicle;
 import eddyledger.quantity.BandSpectrum;
 import eddyledger.quantity.Decibels;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -101,13 +102,20 @@ final class SheetBuilder {
         : "outside its range on " + beyond + " of " + run.panels().size() + " panels";
   }
 
+  /**
+   * The overall target that a total is judged by. Where several hold, the one with the least margin
+   * counts: of one level, that is the one that allows least; among equals the one with the least
+   * tolerance, then the first. All of them remain in {@link #targets()}.
+   */
   private Optional<Target> overallTarget(String condition, String receiver) {
     return targets.stream()
         .map(TargetResult::target)
         .filter(target -> target.rating() == Rating.OVERALL_A)
         .filter(target -> target.condition().equals(condition))
         .filter(target -> target.receivers().contains(receiver))
-        .findFirst();
+        .min(
+            Comparator.comparingDouble(Target::allowed)
+                .thenComparingDouble(target -> target.rule().tolerance()));
   }
 
   private LedgerRow total(Contribution sum, String choice, Optional<Target> target) {

@@ -117,6 +117,28 @@ class JudgedRowsTest {
   }
 
   @Test
+  void ofSeveralTargetsTheOneOfLeastMarginJudgesTheTotal() {
+    double level = Sheets.sheet(LEDGER, ROAD, DRIVER).total().levelA();
+    Target easy = overall("easy", ROAD, DRIVER, level + 6.0);
+    Target hard = overall("hard", ROAD, DRIVER, level + 1.0);
+    Target between = overall("between", ROAD, DRIVER, level + 3.0);
+    PassRule generous = new PassRule(Rounding.NONE, 9.0, Across.WORST);
+    Target lenient =
+        SampleVehicle.target(
+            "lenient", ROAD, List.of(DRIVER), Rating.OVERALL_A, level + 1.0, generous);
+    for (List<Target> targets :
+        List.of(List.of(easy, hard, between), List.of(between, lenient, hard, easy))) {
+      Ledger ledger = Ledger.of(Edits.with(SAMPLE, it -> it.targets(targets)));
+      ReceiverSheet sheet = Sheets.sheet(ledger, ROAD, DRIVER);
+      assertThat(sheet.total().judgement().target()).isEqualTo(level + 1.0);
+      assertThat(sheet.total().judgement().margin()).isCloseTo(0.5, within(1.0e-9));
+      assertThat(sheet.total().judgement().state()).isEqualTo(State.TIGHT);
+      assertThat(sheet.range()).allMatch(row -> row.judgement().target() == level + 1.0);
+      assertThat(ledger.targets().stream().map(TargetResult::target)).isEqualTo(targets);
+    }
+  }
+
+  @Test
   void theWorstSheetIsTheOneOfLeastMargin() {
     Target easy = overall("easy", FLIGHT, PASSENGER, 140.0);
     Target hard = overall("hard", ROAD, TRUNK_EAR, 20.0);
