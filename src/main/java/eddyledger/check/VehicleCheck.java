@@ -14,6 +14,7 @@ public final class VehicleCheck {
     References.check(vehicle, findings);
     Surroundings.check(vehicle, findings);
     Parts.check(vehicle, findings);
+    Allowances.check(vehicle, findings);
     Nodes.check(vehicle, findings);
     Coverage.check(vehicle, findings);
     Completeness.check(vehicle, findings);

@@ -29,7 +29,8 @@ final class SheetRows {
           condition.id().equals(allowance.condition())
               && receiver.id().equals(allowance.receiver());
       if (here) {
-        allowances.put(allowance.node(), allowance.level());
+        // of two for the same row, which the check tells of, the first one holds
+        allowances.putIfAbsent(allowance.node(), allowance.level());
       }
     }
   }

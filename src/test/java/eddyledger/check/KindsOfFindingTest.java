@@ -10,6 +10,9 @@ import org.junit.jupiter.params.provider.CsvSource;
 
 /** Every kind of finding, made by one change in a vehicle that has none. */
 class KindsOfFindingTest {
+  private static final String ALLOWANCE =
+      "{\"node\": \"%s\", \"receiver\": \"driver\", \"condition\": \"cruise\", \"level_dBA\": %s}";
+
   private static Finding only(SmallFile file) {
     List<Finding> findings = VehicleCheck.of(file.vehicle());
     assertThat(findings).hasSize(1);
@@ -188,6 +191,16 @@ class KindsOfFindingTest {
     assertOnly(file, "absorption-assumed", place, "door");
     assertThat(only(file).severity()).isEqualTo(Severity.WARNING);
     assertThat(only(file).what()).contains("absorption added to the zone does not lower");
+  }
+
+  @Test
+  void anAllowanceThatIsGivenTwice() {
+    SmallFile file = new SmallFile().with("allowances[1]", ALLOWANCE.formatted("window", "60"));
+    assertOnly(file, "duplicate-allowance", "allowances[1]", "window");
+    assertThat(only(file).severity()).isEqualTo(Severity.ERROR);
+    assertThat(only(file).what()).contains("\"driver\"", "\"cruise\"", "at allowances[0]");
+    SmallFile other = new SmallFile().with("allowances[1]", ALLOWANCE.formatted("side", "60"));
+    assertThat(VehicleCheck.of(other.vehicle())).isEmpty();
   }
 
   @Test

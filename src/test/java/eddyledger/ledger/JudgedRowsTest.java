@@ -49,6 +49,29 @@ class JudgedRowsTest {
   }
 
   @Test
+  void ofTwoAllowancesForOneRowTheFirstHolds() {
+    Vehicle vehicle =
+        Edits.with(
+            SAMPLE,
+            it ->
+                it.allowances(
+                    List.of(
+                        allowance("floor", DRIVER, ROAD, 61.0),
+                        allowance("floor", PASSENGER, ROAD, 62.0),
+                        allowance("floor", DRIVER, ROAD, 63.0))));
+    Ledger ledger = Ledger.of(vehicle);
+    assertThat(Sheets.row(ledger, ROAD, DRIVER, "floor").judgement().allowance()).isEqualTo(61.0);
+    assertThat(Sheets.row(ledger, ROAD, DRIVER, "floor").status()).isEqualTo(Status.OK);
+    assertThat(Sheets.row(ledger, ROAD, PASSENGER, "floor").judgement().allowance())
+        .isEqualTo(62.0);
+    assertThat(ledger.findings())
+        .filteredOn(finding -> finding.code().equals("duplicate-allowance"))
+        .singleElement()
+        .extracting(finding -> finding.where())
+        .isEqualTo("allowances[2] (floor)");
+  }
+
+  @Test
   void anAllowanceOfAPartialSectionIsNoVerdictUnlessOver() {
     Vehicle vehicle = Edits.settings(SAMPLE, "floor", it -> it.construction("absent"));
     for (double margin : new double[] {5.0, -5.0}) {
