@@ -101,17 +101,17 @@ final class FlowTrace {
   private void wallPressure() {
     String id = panel.input() != null ? panel.input().spectrum() : panel.measured().spectrum();
     WallPressureSpectrum spectrum = WallPressureBands.spectrum(id);
-    String chosen =
-        "wall pressure after " + spectrum.name() + ", " + panel.origins().words("wall_pressure");
     steps.add(
         TraceStep.banded(
             Role.QUANTITY,
             "Gpp",
-            "one-sided spectral density of the wall pressure at mid-band; " + chosen,
+            "one-sided spectral density of the wall pressure at mid-band, after " + spectrum.name(),
             "Pa²/Hz",
             result.wallPressureDensity(),
-            spectrum.source() + "; " + spectrum.confidence(),
-            outOfRange(spectrum.remarks(layer))));
+            panel
+                .origins()
+                .source("wall_pressure", spectrum.source() + "; " + spectrum.confidence()),
+            panel.origins().note("wall_pressure", outOfRange(spectrum.remarks(layer)))));
     steps.add(
         TraceStep.banded(
             Role.START,

@@ -3,10 +3,12 @@ package eddyledger.ledger;
 import eddyledger.check.Finding;
 import eddyledger.model.Held;
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 
 /**
  * Where each value comes from that a panel is computed with in a condition, and whether one of them
@@ -17,6 +19,7 @@ final class Origins {
   private final String panel;
   private final String condition;
   private final Map<String, String> words = new LinkedHashMap<>();
+  private final Set<String> defaults = new HashSet<>();
   private final List<Optional<Finding>> found = new ArrayList<>();
   private String construction = "";
 
@@ -42,7 +45,7 @@ final class Origins {
 
   /** Notes a default. */
   void defaulted(String key) {
-    words.put(key, "default, nobody set it");
+    defaults.add(key);
   }
 
   /** Notes a property of the panel itself. */
@@ -66,9 +69,23 @@ final class Origins {
     return construction;
   }
 
-  /** In words where a value is set; empty if it was never asked for. */
+  /** In words where a value is set; empty if nobody set it or it was never asked for. */
   String words(String key) {
     return words.getOrDefault(key, "");
+  }
+
+  /** Where a value is set, then the publication it stands for; of a default the latter only. */
+  String source(String key, String publication) {
+    return joined(words(key), publication);
+  }
+
+  /** That a value is a default, if it is one, then what else there is to note. */
+  String note(String key, String more) {
+    return joined(defaults.contains(key) ? "default, nobody set it" : "", more);
+  }
+
+  private static String joined(String first, String second) {
+    return first.isEmpty() || second.isEmpty() ? first + second : first + "; " + second;
   }
 
   /** The first error about a value that is used; empty if there is none. */

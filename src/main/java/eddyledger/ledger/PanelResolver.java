@@ -23,6 +23,9 @@ final class PanelResolver {
   /** Convection ratio where none is set: a broad-band value of the literature, 0.6 to 0.85. */
   static final double CONVECTION_RATIO = 0.7;
 
+  /** Where the default of the convection ratio comes from, in words. */
+  static final String CONVECTION_RATIO_SOURCE = "broad-band value of the literature, 0.6 to 0.85";
+
   private final Vehicle vehicle;
   private final LevelErrors errors;
   private final Map<String, Construction> constructions = new HashMap<>();

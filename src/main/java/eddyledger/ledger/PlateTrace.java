@@ -11,6 +11,10 @@ import java.util.List;
 
 /** The steps of a trace from the wall pressure's correlation to the plate's velocity. */
 final class PlateTrace {
+  private static final String RATIO = "convection_ratio";
+  private static final String CROSS = "cross_spectrum";
+  private static final String ORDER = "order of the cross-spectrum ";
+
   private final Vehicle vehicle;
   private final ResolvedPanel panel;
   private final PanelResult result;
@@ -34,34 +38,32 @@ final class PlateTrace {
   private void cross() {
     CrossSpectrumChoice choice = panel.input().cross();
     CrossInput used = CrossInput.of(choice);
-    String where = origins.words("cross_spectrum");
+    String ratio = origins.words(RATIO);
     add(
         "Uc/Ue",
         "convection speed over local flow speed",
         "",
         panel.input().convectionRatio(),
-        origins.words("convection_ratio"),
-        "");
+        ratio.isEmpty() ? PanelResolver.CONVECTION_RATIO_SOURCE : ratio,
+        origins.note(RATIO, ""));
     steps.add(
         TraceStep.banded(
             Role.QUANTITY, "Uc", "convection speed", "m/s", result.convectionSpeed(), "", ""));
-    add(
-        "order_along",
-        "order of the cross-spectrum along the flow",
-        "",
-        used.orderAlong(),
-        used.spectrum().source(),
-        where);
-    add("order_across", "order across the flow", "", used.orderAcross(), "", where);
+    String source = origins.source(CROSS, used.spectrum().source());
+    String note = origins.note(CROSS, "");
+    add("order_along", ORDER + "along the flow", "", used.orderAlong(), source, note);
+    add("order_across", ORDER + "across the flow", "", used.orderAcross(), source, note);
     String carried =
-        "fitted at orders ("
-            + choice.fittedOrderAlong()
-            + ","
-            + choice.fittedOrderAcross()
-            + "), carried by the rule "
-            + choice.rule().text();
-    add("alpha_along", "decay rate along the flow", "", used.decayAlong(), where, carried);
-    add("alpha_across", "decay rate across the flow", "", used.decayAcross(), where, carried);
+        origins.note(
+            CROSS,
+            "fitted at orders ("
+                + choice.fittedOrderAlong()
+                + ","
+                + choice.fittedOrderAcross()
+                + "), carried by the rule "
+                + choice.rule().text());
+    add("alpha_along", "decay rate along the flow", "", used.decayAlong(), source, carried);
+    add("alpha_across", "decay rate across the flow", "", used.decayAcross(), source, carried);
   }
 
   private void plate() {

@@ -115,7 +115,6 @@ final class TraceBuilder {
             "product so far",
             ""));
     String layUp = panel.layUp() == null ? "none" : panel.layUp().id();
-    boolean octaves = panel.layUp() != null && panel.layUp().insertionLoss().best().interpolated();
     steps.add(
         TraceStep.banded(
             Role.QUANTITY,
@@ -124,7 +123,7 @@ final class TraceBuilder {
             "dB",
             bands.insertionLoss().toArray(),
             panel.origins().words("lay_up"),
-            octaves ? "interpolated from octaves, linear in lg f" : ""));
+            layUpNote(panel)));
     steps.add(
         factor(
             "10^(-IL/10)",
@@ -170,6 +169,17 @@ final class TraceBuilder {
             "10 lg p²/(20 µPa)²",
             ""));
     return steps;
+  }
+
+  private static String layUpNote(ResolvedPanel panel) {
+    if (panel.measured() != null) {
+      return "the measured level difference holds the whole path, a lay-up included";
+    }
+    if (panel.layUp() == null) {
+      return panel.origins().words("lay_up").isEmpty() ? "default, nobody set one" : "";
+    }
+    boolean octaves = panel.layUp().insertionLoss().best().interpolated();
+    return octaves ? "interpolated from octaves, linear in lg f" : "";
   }
 
   private static boolean absorptionAssumed(ResolvedPanel panel) {

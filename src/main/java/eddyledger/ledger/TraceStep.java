@@ -11,8 +11,8 @@ import eddyledger.quantity.BandSpectrum;
  * @param unit its unit; empty for a pure number
  * @param values its value per band; the same in all bands where it does not depend on frequency
  * @param varies whether it depends on the band
- * @param source formula and publication, or where it was entered
- * @param note what was defaulted or filled in, what left its range; empty if nothing
+ * @param source where it was entered, then formula and publication; of a default the latter only
+ * @param note that it is a default, what was filled in, what left its range; empty if nothing
  */
 public record TraceStep(
     Role role,

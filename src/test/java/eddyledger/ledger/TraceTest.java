@@ -128,9 +128,16 @@ class TraceTest {
   @Test
   void defaultsAndPlacesOfValuesAreTold() {
     Trace floor = trace("floor", "flight", "driver");
-    assertThat(told(step(floor, "Uc/Ue"))).contains("default, nobody set it");
-    assertThat(told(step(floor, "order_along"))).contains("default, nobody set it");
-    assertThat(step(floor, "Gpp").meaning()).contains("Goody", "default, nobody set it");
+    for (String symbol : List.of("Gpp", "Uc/Ue", "order_along", "order_across", "alpha_across")) {
+      assertThat(step(floor, symbol).note()).as(symbol).startsWith("default, nobody set it");
+      assertThat(step(floor, symbol).source()).as(symbol).isNotEmpty().doesNotContain("default");
+    }
+    assertThat(step(floor, "Gpp").meaning()).endsWith("after Goody");
+    assertThat(step(floor, "Gpp").source()).startsWith("Goody, AIAA J.");
+    assertThat(step(floor, "Uc/Ue").source()).contains("literature, 0.6 to 0.85");
+    assertThat(step(floor, "order_along").source()).startsWith("Corcos");
+    assertThat(step(floor, "alpha_across").source()).startsWith("Corcos");
+    assertThat(step(floor, "alpha_along").note()).contains("; fitted at orders (1,1), carried by");
     assertThat(step(floor, "eta").source()).isEqualTo("from body");
     assertThat(step(floor, "IL").note()).contains("interpolated from octaves");
     assertThat(step(floor, "delta").source()).doesNotContain("as given");
@@ -142,9 +149,28 @@ class TraceTest {
     assertThat(step(trace("side-glass", "flight", "passenger"), "p²/W").meaning())
         .contains("diffuse")
         .doesNotContain("direct");
-    assertThat(told(step(trace("quarter-glass", "road", "driver"), "Uc/Ue")))
-        .contains("set on the panel");
+    Trace quarter = trace("quarter-glass", "road", "driver");
+    assertThat(step(quarter, "Uc/Ue").source()).isEqualTo("set on the panel");
+    assertThat(step(quarter, "order_across").source()).startsWith("set on the panel; Corcos");
+    assertThat(step(quarter, "alpha_across").source()).startsWith("set on the panel; Corcos");
+    for (String symbol : List.of("Uc/Ue", "order_along", "order_across")) {
+      assertThat(step(quarter, symbol).note()).as(symbol).isEmpty();
+    }
+    Trace roof = trace("roof", "road", "driver");
+    assertThat(step(roof, "Gpp").source()).startsWith("set on the panel; Efimtsov, ");
+    assertThat(step(roof, "Gpp").note()).doesNotContain("default");
+  }
+
+  @Test
+  void theLayUpIsToldOrWhyThereIsNone() {
     assertThat(step(trace("roof", "flight", "driver"), "IL").note()).isEmpty();
+    assertThat(step(trace("roof", "flight", "driver"), "IL").source()).isEqualTo("from aft");
+    TraceStep none = step(trace("tail", "road", "trunk-ear"), "IL");
+    assertThat(none.note()).isEqualTo("default, nobody set one");
+    assertThat(none.source()).isEmpty();
+    TraceStep measured = step(trace(SampleTree.MEASURED, "road", "passenger"), "IL");
+    assertThat(measured.note()).contains("holds the whole path");
+    assertThat(measured.source()).isEmpty();
   }
 
   @Test
@@ -176,7 +202,8 @@ class TraceTest {
         .contains("Goody is used at edge Mach number");
     assertThat(step(trace("roof", "road", "passenger"), "Gpp").note())
         .contains("Efimtsov is used at edge Mach number");
-    assertThat(step(trace("tail", "road", "trunk-ear"), "Gpp").note()).isEmpty();
+    assertThat(step(trace("tail", "road", "trunk-ear"), "Gpp").note())
+        .isEqualTo("default, nobody set it");
   }
 
   @Test
@@ -195,10 +222,6 @@ class TraceTest {
         .filter(step -> step.symbol().equals(symbol))
         .findFirst()
         .orElseThrow(() -> new AssertionError("no step " + symbol));
-  }
-
-  private static String told(TraceStep step) {
-    return step.source() + "; " + step.note();
   }
 
   private static void close(double actual, double expected) {
