@@ -3,6 +3,8 @@ package eddyledger.file;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import eddyledger.model.CrossSpectrumChoice;
 import eddyledger.model.CrossSpectrumChoice.Rule;
+import eddyledger.model.Evidence;
+import eddyledger.model.Extras;
 import eddyledger.model.Judged;
 import java.util.Set;
 
@@ -18,6 +20,19 @@ final class CrossSpectrumCodec implements ValueCodec<CrossSpectrumChoice> {
   private static final String FITTED_ALONG = "fitted_order_along";
   private static final String FITTED_ACROSS = "fitted_order_across";
   private static final String RULE = "rule";
+
+  /** What stands for a value that is no object; its orders stop whatever uses it. */
+  private static final CrossSpectrumChoice UNREAD =
+      new CrossSpectrumChoice(
+          0,
+          0,
+          USUAL.decayAlong(),
+          USUAL.decayAcross(),
+          0,
+          0,
+          USUAL.rule(),
+          Evidence.NONE,
+          Extras.NONE);
 
   private CrossSpectrumCodec() {}
 
@@ -39,6 +54,9 @@ final class CrossSpectrumCodec implements ValueCodec<CrossSpectrumChoice> {
   @Override
   public CrossSpectrumChoice read(JsonValue value) {
     JsonObject object = value.object();
+    if (!value.isObject() && !value.absent()) {
+      return UNREAD;
+    }
     Judged along = object.read(DECAY_ALONG, NumberCodec.NUMBER);
     Judged across = object.read(DECAY_ACROSS, NumberCodec.NUMBER);
     Rule rule = object.choice(RULE, Rule.values(), Rule::text);
@@ -56,6 +74,9 @@ final class CrossSpectrumCodec implements ValueCodec<CrossSpectrumChoice> {
 
   @Override
   public ObjectNode write(CrossSpectrumChoice value) {
+    if (value.equals(UNREAD)) {
+      return new JsonBuilder().with(Extras.NONE);
+    }
     JsonBuilder builder =
         new JsonBuilder()
             .whole(ORDER_ALONG, value.orderAlong())

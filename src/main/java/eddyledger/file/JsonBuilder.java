@@ -36,6 +36,7 @@ final class JsonBuilder {
     return put(key, value == null || value.isNaN() ? null : number(value));
   }
 
+  /** A whole number above 0; 0 is one that could not be read and gives way to what was kept. */
   JsonBuilder whole(String key, int value) {
     return put(key, IntNode.valueOf(value));
   }
@@ -44,10 +45,16 @@ final class JsonBuilder {
     return put(key, value == null ? null : BooleanNode.valueOf(value));
   }
 
+  /** Texts in a row, null for those that are null or empty. */
   JsonBuilder texts(String key, List<String> values) {
     ArrayNode list = JsonNodeFactory.instance.arrayNode();
-    values.forEach(list::add);
+    values.forEach(value -> list.add(value == null || value.isEmpty() ? null : value));
     return put(key, list);
+  }
+
+  /** Something of any of the kinds that JSON has. */
+  JsonBuilder free(String key, Object value) {
+    return put(key, FreeJson.write(value));
   }
 
   /** Numbers in a row, null for those that are null or not a number. */
@@ -115,10 +122,31 @@ final class JsonBuilder {
           JsonNode written = into.get(key);
           if (written instanceof ObjectNode nested && value instanceof Map<?, ?> parts) {
             merge(nested, parts);
-          } else if (written == null || written.isObject() && written.isEmpty()) {
+          } else if (written instanceof ArrayNode list && value instanceof List<?> members) {
+            fill(list, members);
+          } else if (nothing(written)) {
             into.set(key, FreeJson.write(value));
           }
         });
+  }
+
+  /** Puts members that could not be read back in their positions, unless the list has changed. */
+  private static void fill(ArrayNode list, List<?> members) {
+    if (list.size() != members.size()) {
+      return;
+    }
+    for (int i = 0; i < list.size(); i++) {
+      if (members.get(i) != null && nothing(list.get(i))) {
+        list.set(i, FreeJson.write(members.get(i)));
+      }
+    }
+  }
+
+  private static boolean nothing(JsonNode written) {
+    return written == null
+        || written.isNull()
+        || written.isObject() && written.isEmpty()
+        || written.isInt() && written.intValue() == 0;
   }
 
   private static JsonNode number(double value) {

@@ -191,11 +191,12 @@ final class JsonObject {
         .forEach(
             property -> {
               String key = property.getKey();
-              if (!asked.containsKey(key)) {
+              JsonValue value = asked.get(key);
+              if (value == null) {
                 unknown(key);
-              }
-              if (!asked.containsKey(key) || asked.get(key).unread()) {
                 kept.put(key, FreeJson.read(property.getValue()));
+              } else if (value.unread()) {
+                kept.put(key, value.kept());
               }
             });
     return kept.isEmpty() ? Extras.NONE : new Extras(kept);

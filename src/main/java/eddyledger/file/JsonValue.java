@@ -6,6 +6,7 @@ import com.fasterxml.jackson.databind.node.ObjectNode;
 import eddyledger.check.NearMiss;
 import eddyledger.check.Severity;
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
 import java.util.function.Function;
 import java.util.stream.Stream;
@@ -23,6 +24,7 @@ final class JsonValue {
   private final Faults faults;
   private boolean unread;
   private JsonObject object;
+  private List<JsonValue> items;
 
   JsonValue(JsonNode node, String place, String subject, Faults faults) {
     this.node = node == null || node.isNull() ? MissingNode.getInstance() : node;
@@ -60,9 +62,19 @@ final class JsonValue {
     return node.isNumber();
   }
 
-  /** Whether it could not be read, so that it has to be kept as it stands. */
+  /** Whether it, or a member of the list it is, could not be read and has to be kept. */
   boolean unread() {
-    return unread;
+    return unread || items != null && items.stream().anyMatch(item -> item.unread);
+  }
+
+  /** What has to be kept: the whole, or a list of as many members with null for what was read. */
+  Object kept() {
+    if (unread) {
+      return FreeJson.read(node);
+    }
+    List<Object> members = new ArrayList<>();
+    items.forEach(item -> members.add(item.unread ? FreeJson.read(item.node) : null));
+    return Collections.unmodifiableList(members);
   }
 
   /** Keeps the value as it stands, without a word. */
@@ -158,17 +170,19 @@ final class JsonValue {
     return object;
   }
 
-  /** The members of the list, absent ones too; empty if it is absent or none. */
+  /** The members of the list, always the same, absent ones too; empty if it is absent or none. */
   List<JsonValue> items() {
-    List<JsonValue> items = new ArrayList<>();
-    if (node.isArray()) {
-      for (int i = 0; i < node.size(); i++) {
-        items.add(new JsonValue(node.get(i), place + "[" + i + "]", subject, faults));
+    if (items == null) {
+      items = new ArrayList<>();
+      if (node.isArray()) {
+        for (int i = 0; i < node.size(); i++) {
+          items.add(new JsonValue(node.get(i), place + "[" + i + "]", subject, faults));
+        }
+      } else if (!absent()) {
+        keep();
+        String what = "A list in brackets is wanted here, not " + shown() + ".";
+        wholeFault("wrong-type", what, "Write it as [ ... ].");
       }
-    } else if (!absent()) {
-      keep();
-      String what = "A list in brackets is wanted here, not " + shown() + ".";
-      wholeFault("wrong-type", what, "Write it as [ ... ].");
     }
     return items;
   }

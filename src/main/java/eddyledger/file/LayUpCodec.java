@@ -5,8 +5,10 @@ import eddyledger.model.Extras;
 import eddyledger.model.LayUp;
 import eddyledger.model.TableContent;
 import eddyledger.model.TabulatedLayUp;
+import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Objects;
 import java.util.Set;
 
 /** A lay-up; the type says of which kind. */
@@ -39,7 +41,6 @@ final class LayUpCodec implements RecordCodec<LayUp> {
       TableContent content = item.choice(TableContent.values(), TableContent::text);
       if (content == null) {
         item.missing();
-        value.keep();
       } else {
         includes.add(content);
       }
@@ -52,11 +53,20 @@ final class LayUpCodec implements RecordCodec<LayUp> {
     return extras.properties().containsKey(TYPE) ? null : TYPES[0];
   }
 
+  /** The members that could not be read; they stand after the others, which have no positions. */
+  private static List<?> unreadMembers(Extras extras) {
+    return extras.properties().get(INCLUDES) instanceof List<?> members
+        ? members.stream().filter(Objects::nonNull).toList()
+        : List.of();
+  }
+
   @Override
   public ObjectNode write(LayUp layUp) {
     TabulatedLayUp table = (TabulatedLayUp) layUp;
     // a set has no order of its own, and the same vehicle must give the same bytes
-    List<String> includes = table.includes().stream().sorted().map(TableContent::text).toList();
+    List<Object> includes = new ArrayList<>();
+    table.includes().stream().sorted().map(TableContent::text).forEach(includes::add);
+    includes.addAll(unreadMembers(table.extras()));
     JsonBuilder builder =
         new JsonBuilder()
             .text("id", table.id())
@@ -65,7 +75,7 @@ final class LayUpCodec implements RecordCodec<LayUp> {
             .value(INSERTION_LOSS, table.insertionLoss(), BandsCodec.BANDS)
             .number(BASE_MASS, table.baseSurfaceMass());
     if (!includes.isEmpty()) {
-      builder.texts(INCLUDES, includes);
+      builder.free(INCLUDES, includes);
     }
     return builder.with(table.extras());
   }

@@ -5,6 +5,7 @@ import com.fasterxml.jackson.databind.node.JsonNodeFactory;
 import com.fasterxml.jackson.databind.node.NullNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import eddyledger.model.ByCondition;
+import eddyledger.model.Extras;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -25,20 +26,30 @@ final class OverrideCodec<T> {
     this.codec = codec;
   }
 
-  /** Reads it; unknown keys beside overrides without a base are kept by the holder. */
+  /**
+   * Reads it. The holder keeps what no value can: overrides that cannot be read, and unknown keys
+   * beside overrides without a base.
+   */
   ByCondition<T> read(JsonValue value, JsonObject holder, String key) {
     if (!value.isObject()) {
       return ByCondition.always(codec.read(value));
     }
     JsonObject object = value.object();
     Map<String, T> overrides = overrides(object.value(KEY));
-    boolean onlyOverrides = !object.value(KEY).absent() && !object.hasAny(codec.keys());
-    if (onlyOverrides) {
-      codec.keys().forEach(object::value);
-      holder.keep(key, object.extras());
-      return new ByCondition<>(null, overrides);
+    Map<String, Object> kept = new LinkedHashMap<>();
+    Extras unread = object.value(KEY).object().extras();
+    if (!unread.properties().isEmpty()) {
+      kept.put(KEY, unread.properties());
     }
-    return new ByCondition<>(codec.read(value), overrides);
+    T base = null;
+    if (object.value(KEY).absent() || object.hasAny(codec.keys())) {
+      base = codec.read(value);
+    } else {
+      codec.keys().forEach(object::value);
+      kept.putAll(object.extras().properties());
+    }
+    holder.keep(key, new Extras(kept));
+    return new ByCondition<>(base, overrides);
   }
 
   private Map<String, T> overrides(JsonValue value) {

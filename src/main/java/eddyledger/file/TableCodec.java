@@ -98,12 +98,7 @@ final class TableCodec implements RecordCodec<BandTable> {
 
   private static List<Double> values(JsonValue value) {
     List<Double> values = new ArrayList<>();
-    for (JsonValue item : value.items()) {
-      values.add(item.number());
-    }
-    if (values.contains(Double.NaN)) {
-      value.keep();
-    }
+    value.items().forEach(item -> values.add(item.number()));
     return values;
   }
 
@@ -152,11 +147,8 @@ final class TableCodec implements RecordCodec<BandTable> {
   static JsonBuilder content(BandTable table) {
     JsonBuilder builder = new JsonBuilder();
     if (table.resolution() != Resolution.SINGLE) {
-      // a row with a member that could not be read is still there as it stood
-      boolean unread = table.values().contains(Double.NaN);
-      boolean kept = unread && table.extras().properties().containsKey(VALUES);
       builder.text(BANDS, table.resolution().text()).text(FIRST, table.first());
-      builder.numbers(VALUES, kept ? null : table.values());
+      builder.numbers(VALUES, table.values());
     } else if (!table.values().get(0).isNaN()) {
       builder.text(BANDS, table.resolution().text()).number(VALUE, table.values().get(0));
     }
