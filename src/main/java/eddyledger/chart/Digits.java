@@ -30,6 +30,18 @@ public final class Digits {
     return text.isEmpty() ? 0.0 : font.getStringBounds(text, PRECISE).getWidth();
   }
 
+  /** The text, or its beginning with an ellipsis, so that it is no wider than the room given. */
+  public static String fitted(Font font, String text, double room) {
+    if (width(font, text) <= room) {
+      return text;
+    }
+    int end = text.length();
+    while (end > 0 && width(font, text.substring(0, end).stripTrailing() + "\u2026") > room) {
+      end--;
+    }
+    return text.substring(0, end).stripTrailing() + "\u2026";
+  }
+
   /** Width of a number with digits of one width, pixels. */
   public static double numberWidth(Font font, String number) {
     double cell = cell(font);
