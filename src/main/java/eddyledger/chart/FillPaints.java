@@ -10,14 +10,18 @@ public final class FillPaints {
     this.palette = palette;
   }
 
-  /** What a part is filled with. */
-  public Paint of(StackFill fill) {
+  /**
+   * What a part is filled with.
+   *
+   * @param scale pixels of the device to one of the drawing, as in the transform of its graphics
+   */
+  public Paint of(StackFill fill, double scale) {
     return switch (fill.kind()) {
       case SERIES -> palette.series().get(fill.number());
       case REMAINDER -> palette.remainder();
-      case LEAK -> Hatch.RISING.paint(palette.ink3(), palette.leak());
+      case LEAK -> Hatch.RISING.paint(palette.ink3(), palette.leak(), scale);
       case ELSEWHERE -> palette.elsewhere();
-      case OTHER -> other(fill.number()).paint(palette.bar(), palette.paper());
+      case OTHER -> other(fill.number()).paint(palette.bar(), palette.paper(), scale);
     };
   }
 

@@ -24,10 +24,20 @@ public enum Hatch {
   private static final int TILE = 6;
   private static final int FINE = 4;
 
-  /** A paint with lines or dots in one colour on another. */
+  /** A paint with lines or dots in one colour on another, sharp on screens of any resolution. */
   public TexturePaint paint(Color lines, Color behind) {
-    // drawn larger than it is shown, so that it stays sharp on screens of high resolution
-    int size = TILE * FINE;
+    return paint(lines, behind, FINE);
+  }
+
+  /**
+   * A paint with lines or dots in one colour on another, smooth at one resolution.
+   *
+   * @param scale pixels of the device to one of the drawing
+   */
+  public TexturePaint paint(Color lines, Color behind, double scale) {
+    // a paint is not smoothed: only a tile of whole pixels of the device comes out as it was drawn
+    int size = (int) Math.max(TILE, Math.round(TILE * scale));
+    double fine = (double) size / TILE;
     BufferedImage image = new BufferedImage(size, size, BufferedImage.TYPE_INT_ARGB);
     Graphics2D g = image.createGraphics();
     g.setRenderingHint(RenderingHints.KEY_ANTIALIASING, RenderingHints.VALUE_ANTIALIAS_ON);
@@ -35,7 +45,7 @@ public enum Hatch {
     g.setColor(behind);
     g.fillRect(0, 0, size, size);
     g.setColor(lines);
-    g.setStroke(new BasicStroke(FINE));
+    g.setStroke(new BasicStroke((float) fine));
     for (int shift = -size; shift <= size; shift += size) {
       switch (this) {
         case RISING -> g.draw(new Line2D.Double(shift - size, 2 * size, shift + 2 * size, -size));
@@ -44,11 +54,12 @@ public enum Hatch {
       }
     }
     if (this == DOTS) {
-      double r = FINE * 0.8;
+      double r = fine * 0.95;
       g.fill(new Ellipse2D.Double(size * 0.25 - r, size * 0.25 - r, 2 * r, 2 * r));
       g.fill(new Ellipse2D.Double(size * 0.75 - r, size * 0.75 - r, 2 * r, 2 * r));
     }
     g.dispose();
-    return new TexturePaint(image, new Rectangle2D.Double(0, 0, TILE, TILE));
+    double shown = size / scale;
+    return new TexturePaint(image, new Rectangle2D.Double(0, 0, shown, shown));
   }
 }

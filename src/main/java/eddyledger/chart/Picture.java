@@ -84,9 +84,12 @@ public enum Picture {
 
   /** The selected row first. */
   private static List<String> curveNames(ReceiverSheet sheet, String selectedId) {
+    List<SpectrumCurve> curves = SpectrumCurve.of(sheet, selectedId);
     List<String> names = new ArrayList<>();
-    for (SpectrumCurve curve : SpectrumCurve.of(sheet, selectedId)) {
-      names.add(0, curve.role() == SpectrumCurve.Role.TOTAL ? "the total" : curve.row().name());
+    List<String> known = SpectrumCurve.names(curves);
+    for (int i = 0; i < curves.size(); i++) {
+      boolean total = curves.get(i).row().kind() == RowKind.TOTAL;
+      names.add(0, total ? "the total" : known.get(i));
     }
     return names;
   }

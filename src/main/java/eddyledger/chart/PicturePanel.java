@@ -4,8 +4,8 @@ import java.awt.BorderLayout;
 import java.awt.Graphics2D;
 import java.awt.geom.Rectangle2D;
 import java.awt.image.BufferedImage;
+import javax.accessibility.AccessibleContext;
 import javax.swing.JPanel;
-import javax.swing.ToolTipManager;
 import org.jfree.chart.ChartPanel;
 import org.jfree.chart.ChartRenderingInfo;
 import org.jfree.chart.JFreeChart;
@@ -31,7 +31,6 @@ public final class PicturePanel extends JPanel {
     panel.setRangeZoomable(false);
     panel.setMouseWheelEnabled(false);
     panel.setOpaque(false);
-    ToolTipManager.sharedInstance().registerComponent(panel);
     add(panel, BorderLayout.CENTER);
   }
 
@@ -42,9 +41,9 @@ public final class PicturePanel extends JPanel {
    */
   public void show(JFreeChart chart, String accessibleDescription) {
     panel.setChart(chart);
-    panel.getAccessibleContext().setAccessibleName("Picture");
-    panel.getAccessibleContext().setAccessibleDescription(accessibleDescription);
-    getAccessibleContext().setAccessibleDescription(accessibleDescription);
+    panel.putClientProperty(AccessibleContext.ACCESSIBLE_NAME_PROPERTY, "Picture");
+    panel.putClientProperty(
+        AccessibleContext.ACCESSIBLE_DESCRIPTION_PROPERTY, accessibleDescription);
   }
 
   /** The picture shown, null if none is. */

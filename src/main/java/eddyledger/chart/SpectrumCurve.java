@@ -41,6 +41,17 @@ record SpectrumCurve(Role role, LedgerRow row) {
     return curves;
   }
 
+  /** Names of curves, without the section where that has a curve of its own. */
+  static List<String> names(List<SpectrumCurve> curves) {
+    String section =
+        curves.stream()
+            .filter(curve -> curve.role() == Role.SECTION)
+            .map(curve -> curve.row().name())
+            .findFirst()
+            .orElse("");
+    return curves.stream().map(curve -> ShortName.within(curve.row().name(), section)).toList();
+  }
+
   /** The selected row; the total if there is no row of the id. */
   static LedgerRow selected(ReceiverSheet sheet, String selectedId) {
     return sheet.row(selectedId, Way.ALL).orElse(sheet.total());

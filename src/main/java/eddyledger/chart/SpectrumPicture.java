@@ -1,6 +1,5 @@
 package eddyledger.chart;
 
-import eddyledger.chart.SpectrumCurve.Role;
 import eddyledger.ledger.LedgerRow;
 import eddyledger.ledger.ReceiverSheet;
 import eddyledger.quantity.Bands;
@@ -30,7 +29,7 @@ public final class SpectrumPicture {
   public static JFreeChart of(ReceiverSheet sheet, String selectedId, ChartStyle style) {
     List<SpectrumCurve> curves = SpectrumCurve.of(sheet, selectedId);
     Optional<AllowedLine> allowed = AllowedLine.of(sheet);
-    CurveLabels labels = new CurveLabels(style, curves, names(curves));
+    CurveLabels labels = new CurveLabels(style, curves, SpectrumCurve.names(curves));
     BandAxis axis = new BandAxis(style, labels.room(), 0.0, false);
     XYPlot plot = style.plot(axis, new LevelAxis(scale(curves, allowed)));
     LedgerRow selected = SpectrumCurve.selected(sheet, selectedId);
@@ -51,16 +50,6 @@ public final class SpectrumPicture {
       plot.addAnnotation(new ReasonText(style, axis, selected.reason()));
     }
     return style.chart(plot);
-  }
-
-  private static List<String> names(List<SpectrumCurve> curves) {
-    String section =
-        curves.stream()
-            .filter(curve -> curve.role() == Role.SECTION)
-            .map(curve -> curve.row().name())
-            .findFirst()
-            .orElse("");
-    return curves.stream().map(curve -> ShortName.within(curve.row().name(), section)).toList();
   }
 
   private static double[][] series(double[] levels) {

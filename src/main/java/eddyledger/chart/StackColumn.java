@@ -54,7 +54,7 @@ final class StackColumn {
   }
 
   private void part(Graphics2D g2, StackFill fill, Rectangle2D place) {
-    g2.setPaint(paints.of(fill));
+    g2.setPaint(paints.of(fill, g2.getTransform().getScaleX()));
     g2.fill(place);
     g2.setStroke(style.fine());
     if (paints.edged(fill)) {
