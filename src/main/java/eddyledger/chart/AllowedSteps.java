@@ -106,6 +106,9 @@ final class AllowedSteps extends AbstractXYItemRenderer {
       double[] first) {
     double width = Digits.width(style.strongSmall(), line.words());
     double half = axis.bandWidth(area) / 2.0;
+    if (width > axis.bandsEnd(area) - area.getMinX()) {
+      return;
+    }
     double x = first[0];
     double baseline = highest(area, levels, dataset, series, x, x + width) - BESIDE;
     for (int i = 0; i < Bands.COUNT; i++) {

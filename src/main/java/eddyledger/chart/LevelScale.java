@@ -12,10 +12,17 @@ record LevelScale(double lower, double upper) {
   private static final double HEADROOM = 0.13;
   private static final double NEAR_TEN = 2.0;
 
-  /** Decades of ten from the highest level that is to be seen down. */
-  static LevelScale below(double highest) {
-    double top = Double.isFinite(highest) ? highest : EMPTY;
-    return between(10.0 * Math.floor(top / 10.0) - STACK_SPAN, top);
+  /**
+   * Four tens below the highest level of all, and up to what is allowed if that is higher.
+   *
+   * @param highest highest level, dB(A); not finite if none is known
+   * @param allowed level allowed, dB(A); NaN if there is none
+   */
+  static LevelScale below(double highest, double allowed) {
+    double known = Double.isFinite(highest) ? highest : allowed;
+    double base = Double.isFinite(known) ? known : EMPTY;
+    double top = allowed > base ? allowed : base;
+    return between(10.0 * Math.floor(base / 10.0) - STACK_SPAN, top);
   }
 
   /** From a level, rounded down to tens, to another with headroom. */

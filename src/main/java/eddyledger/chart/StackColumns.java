@@ -71,6 +71,9 @@ final class StackColumns extends AbstractXYItemRenderer {
         new Rectangle2D.Double(x - width / 2.0, top, width, dataArea.getMaxY() - top);
     if (Double.isNaN(level)) {
       missing(g2, whole, all);
+      if (all) {
+        labels.withoutColumn(g2, whole, axis.labelsStart(dataArea), dataArea);
+      }
       return;
     }
     if (level <= rangeAxis.getLowerBound()) {
@@ -119,7 +122,8 @@ final class StackColumns extends AbstractXYItemRenderer {
     g2.setPaint(style.palette().ink3());
     g2.setFont(style.small());
     String text = all ? "not known" : "\u2014";
-    double x = whole.getCenterX() - Digits.width(style.small(), text) / 2.0;
+    double width = Digits.width(style.small(), text);
+    double x = all ? whole.getMaxX() - width : whole.getCenterX() - width / 2.0;
     g2.drawString(text, (float) x, (float) (whole.getMaxY() - 4.0));
   }
 

@@ -15,6 +15,7 @@ import java.util.Optional;
 final class StackLabels {
   private static final double LEADER = 20.0;
   private static final double ELBOW = 8.0;
+  private static final double SAMPLE = 10.0;
   private static final double NAME_GAP = 7.0;
   private static final double LEFT_GAP = 14.0;
   private static final double LONGEST_NAME = 170.0;
@@ -86,28 +87,68 @@ final class StackLabels {
 
   void paint(
       Graphics2D g2, Rectangle2D whole, List<Rectangle2D> places, double x, Rectangle2D area) {
-    head(g2, whole, area);
+    level(g2, whole, area);
+    allowed(g2, whole, area);
     names(g2, places, x, area);
   }
 
-  /** Level over the column and, at the height of the line, what is allowed left of it. */
-  private void head(Graphics2D g2, Rectangle2D whole, Rectangle2D area) {
+  /** Where the overall level is not known: what is allowed, and the parts with their fills. */
+  void withoutColumn(Graphics2D g2, Rectangle2D whole, double x, Rectangle2D area) {
+    allowed(g2, whole, area);
+    FillPaints paints = new FillPaints(style.palette());
+    double gap = style.small().getSize2D() * LINE;
+    double y = area.getMaxY() - gap / 2.0;
+    for (StackPart part : parts.parts()) {
+      Rectangle2D sample = new Rectangle2D.Double(x + ELBOW, y - SAMPLE / 2.0, SAMPLE, SAMPLE);
+      g2.setPaint(paints.of(part.fill(), g2.getTransform().getScaleX()));
+      g2.fill(sample);
+      if (paints.edged(part.fill())) {
+        g2.setPaint(style.palette().bar());
+        g2.setStroke(style.fine());
+        g2.draw(sample);
+      }
+      Font font = font(part);
+      double left = x + ELBOW + SAMPLE + NAME_GAP;
+      g2.setFont(font);
+      g2.setPaint(style.palette().ink());
+      String name = Digits.fitted(font, part.label(), area.getMaxX() - left);
+      g2.drawString(name, (float) left, (float) (y + BASELINE * font.getSize2D()));
+      y -= gap;
+    }
+  }
+
+  /** The level over the column. */
+  private void level(Graphics2D g2, Rectangle2D whole, Rectangle2D area) {
     Font font = style.strongSmall();
-    g2.setFont(font);
-    double line = area.getMaxY() - allowedShare * area.getHeight();
+    double line = line(area);
     double top = whole.getMinY() - 6.0;
     // a label just over the column would stand on the line
     boolean crossed = line < whole.getMinY() && line > top - font.getSize2D() - 2.0;
+    g2.setFont(font);
     g2.setPaint(style.palette().ink());
-    double middle = whole.getCenterX() + Digits.numberWidth(font, total) / 2.0;
-    Digits.drawRight(g2, total, middle, crossed ? line - 5.0 : top);
-    if (allowed.isPresent()) {
-      double right = whole.getMinX() - LEFT_GAP + 2.0;
-      right(g2, allowed.get().overallWords(), right, line + BASELINE * font.getSize2D());
-      g2.setPaint(style.palette().stateText(State.OVER));
-      double below = line + (BASELINE + LINE) * font.getSize2D();
-      right(g2, allowed.get().excessWords(), right, below);
+    double right = whole.getCenterX() + Digits.numberWidth(font, total) / 2.0;
+    Digits.drawRight(g2, total, right, crossed ? line - 5.0 : top);
+  }
+
+  /** What is allowed, left of the column at the height of the line; inside the picture always. */
+  private void allowed(Graphics2D g2, Rectangle2D whole, Rectangle2D area) {
+    if (allowed.isEmpty()) {
+      return;
     }
+    Font font = style.strongSmall();
+    double size = font.getSize2D();
+    double lines = allowed.get().excessWords().isEmpty() ? 1.0 : 1.0 + LINE;
+    double line = Math.min(line(area), area.getMaxY() - lines * size);
+    double right = whole.getMinX() - LEFT_GAP + 2.0;
+    g2.setFont(font);
+    g2.setPaint(style.palette().ink());
+    right(g2, allowed.get().overallWords(), right, line + BASELINE * size);
+    g2.setPaint(style.palette().stateText(State.OVER));
+    right(g2, allowed.get().excessWords(), right, line + (BASELINE + LINE) * size);
+  }
+
+  private double line(Rectangle2D area) {
+    return area.getMaxY() - allowedShare * area.getHeight();
   }
 
   private static void right(Graphics2D g2, String text, double x, double baseline) {

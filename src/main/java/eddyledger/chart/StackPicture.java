@@ -32,11 +32,10 @@ public final class StackPicture {
     Optional<AllowedLine> allowed = AllowedLine.of(sheet);
     double overall = total.levelA();
     double[] levels = Energies.levelsA(total.meanSquares());
-    double highest = Arrays.stream(levels).filter(Double::isFinite).max().orElse(Double.NaN);
-    for (double value : new double[] {overall, allowed.map(AllowedLine::overall).orElse(overall)}) {
-      highest = Double.isFinite(value) && !(highest > value) ? value : highest;
-    }
-    LevelScale scale = LevelScale.below(highest);
+    double peak = Arrays.stream(levels).filter(Double::isFinite).max().orElse(Double.NaN);
+    double highest = Double.isFinite(overall) ? overall : peak;
+    LevelScale scale =
+        LevelScale.below(highest, allowed.map(AllowedLine::overall).orElse(Double.NaN));
     String text = (parts.partial() ? LevelWords.AT_LEAST : "") + LevelWords.level(overall);
     double at = allowed.map(line -> scale.place(line.overall())).orElse(Double.NaN);
     StackLabels labels = new StackLabels(style, parts, allowed, text, at);

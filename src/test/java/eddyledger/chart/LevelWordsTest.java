@@ -58,10 +58,15 @@ class LevelWordsTest {
 
   @Test
   void scalesGoByTensWithRoomAboveTheHighest() {
-    assertThat(LevelScale.below(74.8).lower()).isEqualTo(30.0);
-    assertThat(LevelScale.below(74.8).upper()).isBetween(79.0, 82.0);
-    assertThat(LevelScale.below(81.0).lower()).isEqualTo(40.0);
-    assertThat(LevelScale.below(Double.NaN).lower()).isEqualTo(20.0);
+    double none = Double.NaN;
+    assertThat(LevelScale.below(74.8, none).lower()).isEqualTo(30.0);
+    assertThat(LevelScale.below(74.8, none).upper()).isBetween(79.0, 82.0);
+    assertThat(LevelScale.below(81.0, 75.0).lower()).isEqualTo(40.0);
+    assertThat(LevelScale.below(none, none).lower()).isEqualTo(20.0);
+    // a target far above does not push the columns out of the picture
+    assertThat(LevelScale.below(54.0, 110.0).lower()).isEqualTo(10.0);
+    assertThat(LevelScale.below(54.0, 110.0).upper()).isGreaterThan(115.0);
+    assertThat(LevelScale.below(none, 75.0).lower()).isEqualTo(30.0);
     assertThat(LevelScale.between(23.0, 70.0).lower()).isEqualTo(20.0);
     assertThat(new LevelScale(30.0, 80.0).place(55.0)).isEqualTo(0.5);
   }

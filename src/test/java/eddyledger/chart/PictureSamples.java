@@ -1,13 +1,20 @@
 package eddyledger.chart;
 
 import com.formdev.flatlaf.fonts.inter.FlatInterFont;
+import eddyledger.ledger.Judgement;
+import eddyledger.ledger.LedgerRow;
 import eddyledger.ledger.ReceiverSheet;
+import eddyledger.ledger.Status;
+import eddyledger.quantity.BandSpectrum;
+import eddyledger.quantity.Bands;
 import java.awt.Font;
 import java.awt.image.BufferedImage;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.LinkedHashMap;
+import java.util.List;
 import java.util.Map;
 import javax.imageio.ImageIO;
 import org.jfree.chart.JFreeChart;
@@ -51,7 +58,35 @@ final class PictureSamples {
     both(charts, "missing-panel", missing, "crown-e", style);
     both(charts, "missing-total", missing, "quillon-82", style);
     both(charts, "no-target", ExampleLedger.withoutTarget(cruise), "station-a", style);
+    ReceiverSheet gap = withoutBand(cruise, Bands.position("200"));
+    both(charts, "gap-panel", gap, "crown-e", style);
     return charts;
+  }
+
+  /** A sheet none of whose rows knows one band. */
+  private static ReceiverSheet withoutBand(ReceiverSheet sheet, int band) {
+    List<LedgerRow> rows = new ArrayList<>();
+    for (LedgerRow row : sheet.rows()) {
+      double[] values = row.meanSquares().toArray();
+      values[band] = Double.NaN;
+      Judgement known = row.judgement();
+      Judgement judgement =
+          new Judgement(known.target(), known.reserve(), known.allowance(), Double.NaN, null);
+      rows.add(
+          new LedgerRow(
+              row.id(),
+              row.parent(),
+              row.depth(),
+              row.name(),
+              row.kind(),
+              row.way(),
+              row.choice(),
+              BandSpectrum.of(values),
+              judgement,
+              Status.PARTIAL,
+              "no value at 200 Hz"));
+    }
+    return new ReceiverSheet(sheet.condition(), sheet.receiver(), rows, List.of());
   }
 
   private static void both(

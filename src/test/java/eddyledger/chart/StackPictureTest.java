@@ -134,6 +134,11 @@ class StackPictureTest {
     List<XYItemEntity> places = places(chart);
     assertThat(places).hasSize(Bands.COUNT - 1).noneMatch(place -> place.getItem() == 10);
     assertThat(places.get(0).getToolTipText()).endsWith("100 % of what is known");
+    // without a column over all bands the part is named beside a sample of its fill
+    BufferedImage image = PicturePanel.image(chart, 900, 300, 1.0);
+    Color fill = Palette.LIGHT.series().get(0);
+    BufferedImage right = image.getSubimage(700, 0, 200, 300);
+    assertThat(count(right, fill)).isBetween(64L, 144L);
   }
 
   @Test
