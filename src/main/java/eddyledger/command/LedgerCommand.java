@@ -5,6 +5,7 @@ import static eddyledger.command.Figures.margin;
 
 import eddyledger.app.Projects;
 import eddyledger.app.Tables;
+import eddyledger.ledger.Cautions;
 import eddyledger.ledger.Judgement;
 import eddyledger.ledger.Ledger;
 import eddyledger.ledger.ReceiverSheet;

@@ -2,6 +2,7 @@ package eddyledger.command;
 
 import eddyledger.app.Projects;
 import eddyledger.app.Tables;
+import eddyledger.ledger.Cautions;
 import eddyledger.ledger.Ledger;
 import eddyledger.ledger.ReceiverSheet;
 import eddyledger.ledger.Trace;
