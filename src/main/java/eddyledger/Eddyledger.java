@@ -2,6 +2,7 @@ package eddyledger;
 
 import eddyledger.app.Projects;
 import eddyledger.app.Tables;
+import eddyledger.app.Workbooks;
 import eddyledger.command.MainCommand;
 import eddyledger.file.ProjectReader;
 import java.io.Console;
@@ -20,7 +21,7 @@ public final class Eddyledger {
     PrintWriter out = writer(System.out);
     PrintWriter err = writer(System.err);
     Projects projects = new Projects(new ProjectReader());
-    int code = new MainCommand(projects, new Tables(), out, err).run(arguments);
+    int code = new MainCommand(projects, new Tables(), new Workbooks(), out, err).run(arguments);
     System.exit(code);
   }
 

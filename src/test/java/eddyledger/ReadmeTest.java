@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import eddyledger.app.Projects;
 import eddyledger.app.Tables;
+import eddyledger.app.Workbooks;
 import eddyledger.command.MainCommand;
 import eddyledger.file.ProjectReader;
 import java.io.IOException;
@@ -38,7 +39,8 @@ class ReadmeTest {
     StringWriter out = new StringWriter();
     PrintWriter writer = new PrintWriter(out);
     Projects projects = new Projects(new ProjectReader());
-    int code = new MainCommand(projects, new Tables(), writer, writer).run(arguments);
+    int code =
+        new MainCommand(projects, new Tables(), new Workbooks(), writer, writer).run(arguments);
     assertThat(code).as(out.toString()).isZero();
     return out.toString();
   }

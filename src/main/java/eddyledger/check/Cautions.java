@@ -12,4 +12,9 @@ public final class Cautions {
           "Local codes and licensed practice decide.");
 
   private Cautions() {}
+
+  /** The short form as one paragraph. */
+  public static String text() {
+    return String.join(" ", SHORT);
+  }
 }

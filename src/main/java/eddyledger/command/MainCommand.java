@@ -2,6 +2,7 @@ package eddyledger.command;
 
 import eddyledger.app.Projects;
 import eddyledger.app.Tables;
+import eddyledger.app.Workbooks;
 import java.io.PrintWriter;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
@@ -28,15 +29,18 @@ public final class MainCommand implements Runnable {
    *
    * @param projects opens project files
    * @param tables writes tables
+   * @param workbooks writes workbooks
    * @param out where results go
    * @param err where complaints go
    */
-  public MainCommand(Projects projects, Tables tables, PrintWriter out, PrintWriter err) {
+  public MainCommand(
+      Projects projects, Tables tables, Workbooks workbooks, PrintWriter out, PrintWriter err) {
     line =
         new CommandLine(this)
             .addSubcommand(new CheckCommand(projects))
             .addSubcommand(new LedgerCommand(projects, tables))
-            .addSubcommand(new TraceCommand(projects, tables));
+            .addSubcommand(new TraceCommand(projects, tables))
+            .addSubcommand(new WorkbookCommand(projects, workbooks));
     line.setOut(out);
     line.setErr(err);
     line.setCaseInsensitiveEnumValuesAllowed(true);

@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import eddyledger.app.Projects;
 import eddyledger.app.Tables;
+import eddyledger.app.Workbooks;
 import eddyledger.file.ProjectReader;
 import java.io.IOException;
 import java.io.PrintWriter;
@@ -35,7 +36,9 @@ record CommandRun(int code, String out, String err) {
       Projects projects, PrintWriter writer, StringWriter out, Object... arguments) {
     StringWriter err = new StringWriter();
     String[] words = Arrays.stream(arguments).map(String::valueOf).toArray(String[]::new);
-    int code = new MainCommand(projects, new Tables(), writer, new PrintWriter(err)).run(words);
+    int code =
+        new MainCommand(projects, new Tables(), new Workbooks(), writer, new PrintWriter(err))
+            .run(words);
     return new CommandRun(code, out.toString(), err.toString());
   }
 

@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import eddyledger.app.Projects;
 import eddyledger.app.Tables;
+import eddyledger.app.Workbooks;
 import eddyledger.file.ProjectReader;
 import java.io.IOException;
 import java.io.PrintWriter;
@@ -22,7 +23,8 @@ class LedgerCommandTest {
 
   private int run(String... arguments) {
     Projects projects = new Projects(new ProjectReader());
-    return new MainCommand(projects, new Tables(), new PrintWriter(out), new PrintWriter(err))
+    return new MainCommand(
+            projects, new Tables(), new Workbooks(), new PrintWriter(out), new PrintWriter(err))
         .run(arguments);
   }
 
