@@ -40,16 +40,14 @@ final class AccountBuilder {
         trace.panel().id(),
         trace.condition().id(),
         trace.receiver().id(),
-        trace.panel().name()
-            + ", heard at "
+        trace.panel().name(),
+        "Heard at "
             + trace.receiver().name()
             + " in "
-            + trace.condition().name(),
-        trace.hasValue()
-            ? "From the air outside to "
-                + total.level()
-                + ". Each step gives its rule, its numbers and where they come from."
-            : "There is no value to account for.",
+            + trace.condition().name()
+            + (trace.hasValue()
+                ? ": from the air outside to " + total.level() + ", step by step."
+                : ": there is no value to account for."),
         band,
         stages,
         LevelAxis.over(stages),

@@ -1,6 +1,6 @@
 package eddyledger.present;
 
-import eddyledger.command.Cautions;
+import eddyledger.check.Cautions;
 import java.util.ArrayList;
 import java.util.List;
 

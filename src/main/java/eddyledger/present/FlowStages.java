@@ -153,8 +153,6 @@ final class FlowStages {
             + Readable.length(source.value("delta"))
             + ",  δ* = "
             + Readable.length(source.value("delta*"))
-            + ",  θ = "
-            + Readable.length(source.value("theta"))
             + ",  τ_{w} = "
             + Readable.pressure(source.value("tau_w"))
             + ",  u_{τ} = "
@@ -205,7 +203,7 @@ final class FlowStages {
         -1,
         0.0,
         thickness * 1.25,
-        "0 m/s",
+        "0",
         "speed over the wall",
         Readable.number(speed, 3) + " m/s");
   }

@@ -36,12 +36,12 @@ final class PathStages {
   }
 
   private StageText computed(StagePicture picture, String change) {
-    String size = Readable.length(source.value("a")) + " by " + Readable.length(source.value("b"));
+    String size = Readable.size(source.value("a"), source.value("b"));
     int modes = (int) source.value("modes");
     return new StageText(
         pieces() + construction() + ", " + size + ".",
         origins(),
-        "W = n p^{2} Σ_{modes} joint acceptance · radiation efficiency · resonance",
+        "W = n p^{2} Σ_{modes} acceptance · radiation · resonance",
         "f_{1} = "
             + Readable.frequency(source.value("f1"))
             + ",  f_{c} = "
@@ -123,10 +123,10 @@ final class PathStages {
       return bare("None: the panel radiates straight into the zone.", "no lay-up");
     }
     return new StageText(
-        layUp.get().name() + ": its insertion loss.",
+        layUp.get().name() + ".",
         "Lay-up "
             + source.where().ofFixed(Settings::layUp)
-            + "; its loss"
+            + "; insertion loss"
             + graded(loss(layUp.get())),
         "L_{W} after = L_{W} before − IL",
         "IL = " + Readable.level(source.value("IL")) + " dB in the band " + source.bandName(),

@@ -35,7 +35,7 @@ final class PressureStages {
         "p^{2} = ∫ G_{pp}(f) df over the band",
         "L_{p} = "
             + Readable.level(levels[source.band()])
-            + " dB at the wall in the band "
+            + " dB in the band "
             + source.bandName()
             + ",  G_{pp} = "
             + Readable.number(source.value("Gpp"), 3)

@@ -54,6 +54,13 @@ final class Readable {
     return Math.abs(metres) < 1.0 ? plain3(metres * THOUSAND) + " mm" : plain3(metres) + " m";
   }
 
+  /** Two lengths given in metres: {@code 500 by 180 mm}. */
+  static String size(double first, double second) {
+    boolean both = Math.abs(first) < 1.0 && Math.abs(second) < 1.0;
+    String text = length(first);
+    return (both ? text.substring(0, text.length() - 3) : text) + " by " + length(second);
+  }
+
   /** A pressure in pascal: kilopascal from a thousand on. */
   static String pressure(double pascal) {
     return Math.abs(pascal) < THOUSAND

@@ -30,6 +30,9 @@ public record StagePicture(
     String middle,
     String right) {
 
+  /** From here on captions need no decimals. */
+  private static final double WHOLE = 10.0;
+
   /** How it is shown. */
   public enum Kind {
     /** Nothing to show. */
@@ -79,15 +82,21 @@ public record StagePicture(
         "12.5 kHz");
   }
 
-  /** Least and most of some values in words: {@code −51.0 to −30.2 dB}; a dash if there is none. */
+  /** Least and most of some values in words: {@code −51 to −30 dB}. */
   static String range(double[] values, String unit) {
     double least = Arrays.stream(values).filter(Double::isFinite).min().orElse(Double.NaN);
     double most = Arrays.stream(values).filter(Double::isFinite).max().orElse(Double.NaN);
-    String low = Readable.level(least);
-    String high = Readable.level(most);
-    if (low.equals(Readable.NONE)) {
+    if (Double.isNaN(least)) {
       return "no value";
     }
+    boolean whole = Math.max(Math.abs(least), Math.abs(most)) >= WHOLE;
+    String low = whole ? whole(least) : Readable.level(least);
+    String high = whole ? whole(most) : Readable.level(most);
     return low.equals(high) ? low + " " + unit + " in all bands" : low + " to " + high + " " + unit;
+  }
+
+  private static String whole(double value) {
+    long rounded = Math.round(value);
+    return (rounded < 0 ? "−" : "") + Math.abs(rounded);
   }
 }

@@ -15,8 +15,8 @@ import java.util.stream.IntStream;
  * @param panelId id of the panel
  * @param conditionId id of the operating condition
  * @param receiverId id of the receiver
- * @param title whose contribution, heard where, in which condition
- * @param subtitle what comes out, or that there is no value
+ * @param title whose contribution
+ * @param subtitle heard where, in which condition, what comes out or that there is no value
  * @param band the followed band, 0 .. 27
  * @param stages the stages; empty if there is no value
  * @param axis the axis of the running level

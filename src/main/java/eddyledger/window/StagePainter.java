@@ -180,7 +180,8 @@ final class StagePainter {
       double right = plot.getX() + 0.66 * plot.getWidth();
       g.draw(new Line2D.Double(plot.getX(), y, right, y));
       g.setColor(palette.ink2());
-      g.drawString(picture.names().get(i), (float) (right + 4), (float) (y + 4));
+      g.drawString(
+          picture.names().get(i), (float) (right + 4), (float) Math.min(y + 4, plot.getMaxY() - 3));
     }
     g.setColor(palette.bar());
     g.setStroke(CURVE);

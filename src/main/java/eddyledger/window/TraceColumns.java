@@ -31,7 +31,7 @@ record TraceColumns(
 
   private static final double GAP = 24.0;
   private static final double NUMBER = 28.0;
-  private static final double CHANGE = 68.0;
+  private static final double CHANGE = 82.0;
   private static final double LEVEL = 76.0;
   private static final double STEP_SHARE = 0.47;
 

@@ -12,8 +12,8 @@ import javax.accessibility.AccessibleRole;
 
 /** The bottom line of a trace: all bands together, and how they stand. */
 final class TraceFooter extends Painted {
-  private static final int HEIGHT = 48;
-  private static final int BASELINE = 30;
+  private static final int HEIGHT = 44;
+  private static final int BASELINE = 28;
   private static final double MARK = 9.0;
 
   private transient TraceTotal total;

@@ -77,7 +77,7 @@ public final class TraceView extends JPanel {
     JPanel top =
         new JPanel(
             new MigLayout(
-                "insets 12 24 6 24, gapx 8, gapy 2", "[grow,shrink,0:pref:]push[][]16[][]16[][]"));
+                "insets 10 24 4 24, gapx 8, gapy 2", "[grow,shrink,0:pref:]push[][]16[][]16[][]"));
     top.setOpaque(false);
     JLabel follow = new JLabel("Follow band");
     follow.setLabelFor(bands);

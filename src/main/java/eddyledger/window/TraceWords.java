@@ -15,8 +15,8 @@ import java.util.List;
  * Lays out and paints the words of a stage: left what happens, right rule and numbers, below notes.
  */
 final class TraceWords {
-  private static final double LEAST = 74.0;
-  private static final double AIR = 9.0;
+  private static final double LEAST = 70.0;
+  private static final double AIR = 7.0;
   private static final double LINE = 17.0;
   private static final double SMALL_LINE = 15.0;
   private static final double ASCENT = 12.0;

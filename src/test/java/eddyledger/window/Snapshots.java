@@ -36,7 +36,7 @@ final class Snapshots {
                 .read(Path.of("examples", "quillon-82.eddyledger"))
                 .vehicle()
                 .orElseThrow());
-    snapshots.trace(ledger, Palette.LIGHT, 1440, 900, "upper-side-left-a", false);
+    snapshots.trace(ledger, Palette.LIGHT, 1440, 960, "upper-side-left-a", false);
     snapshots.trace(ledger, Palette.DARK, 1366, 768, "lower-side-left-b", false);
     snapshots.trace(ledger, Palette.LIGHT, 1366, 768, "window-panes-left-a", true);
     System.exit(0);
