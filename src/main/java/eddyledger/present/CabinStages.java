@@ -12,7 +12,6 @@ import eddyledger.present.TraceNote.Kind;
 import eddyledger.quantity.AWeighting;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Optional;
 
 /** Writes the stages in the cabin: zone and receiver. */
 final class CabinStages {
@@ -31,18 +30,13 @@ final class CabinStages {
   StageText zone() {
     double[] area = source.values("A");
     String passes = into.id().equals(at.id()) ? "" : ", and passes on to " + at.name();
-    Optional<DirectPath> direct =
-        receiver.direct().stream()
-            .filter(path -> path.panel().equals(source.trace().panel().id()))
-            .findFirst();
-    String sight =
-        direct.map(path -> "; direct sound from " + Readable.length(path.distance())).orElse("");
+    String sight = direct() ? "; direct sound from " + Readable.length(distance()) : "";
     String metres = StagePicture.range(area, "m²");
     return new StageText(
         "Power meets the absorption of " + into.name() + passes + sight + ".",
         "Zone "
             + source.where().ofFixed(Settings::zone)
-            + "; absorption of the zone"
+            + "; absorption entered"
             + graded(into.absorptionArea()),
         "p^{2} = 4 ρ c W/A, balanced with the zones behind open apertures"
             + (sight.isEmpty() ? "" : ", and direct part"),
@@ -54,6 +48,19 @@ final class CabinStages {
             + Readable.level(source.steps().change(Stage.ZONE, source.band()))
             + " dB",
         StagePicture.bands(area, source.band(), true, metres));
+  }
+
+  /** Whether the run counted direct sound; it may refuse a line of sight that was entered. */
+  private boolean direct() {
+    return source.steps().find("p²/W").orElseThrow().meaning().contains("direct part");
+  }
+
+  private double distance() {
+    return receiver.direct().stream()
+        .filter(path -> path.panel().equals(source.trace().panel().id()))
+        .mapToDouble(DirectPath::distance)
+        .findFirst()
+        .orElse(Double.NaN);
   }
 
   private String graded(ByCondition<JudgedBands> area) {
@@ -111,11 +118,17 @@ final class CabinStages {
           notes.add(new TraceNote(Kind.NOTE, zone.name() + ": " + lower(finding.what())));
         }
       }
-      if (finding.subject().equals(receiver.id())) {
+      if (finding.subject().equals(receiver.id()) && concerns(finding.what())) {
         notes.add(new TraceNote(Kind.NOTE, receiver.name() + ": " + lower(finding.what())));
       }
     }
     return notes;
+  }
+
+  /** Findings about a receiver may name one panel; those about others are of no use here. */
+  private boolean concerns(String what) {
+    return !what.contains("panel \"")
+        || what.contains("panel \"" + source.trace().panel().id() + "\"");
   }
 
   private static String lower(String sentence) {

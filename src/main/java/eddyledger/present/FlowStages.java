@@ -39,7 +39,7 @@ final class FlowStages {
                 + " than the standard day.";
     String sentence =
         standard
-            ? "Standard atmosphere at " + Readable.plain(air.altitude() / KILO) + " km" + day
+            ? "Standard atmosphere at " + height(air.altitude()) + day
             : "Air as entered, by temperature and pressure.";
     boolean low = standard && air.altitude() <= 11.0 * KILO;
     String temperature = low ? "T = 288.15 − 6.5 h,  " : "T = 216.65 from 11 km up,  ";
@@ -57,6 +57,12 @@ final class FlowStages {
             + " kg/m³,  c = "
             + Readable.speed(source.value("c")),
         standard ? column(offset) : StagePicture.none("Air as entered"));
+  }
+
+  private static String height(double metres) {
+    return Math.abs(metres) < KILO
+        ? Readable.plain(metres) + " m"
+        : Readable.plain(metres / KILO) + " km";
   }
 
   private StagePicture column(double offset) {
@@ -204,7 +210,7 @@ final class FlowStages {
         0.0,
         thickness * 1.25,
         "0",
-        "speed over the wall",
+        "speed",
         Readable.number(speed, 3) + " m/s");
   }
 }

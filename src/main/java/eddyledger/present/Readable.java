@@ -25,7 +25,8 @@ final class Readable {
     if (!Double.isFinite(value)) {
       return NONE;
     }
-    BigDecimal rounded = new BigDecimal(value).round(new MathContext(digits, RoundingMode.HALF_UP));
+    BigDecimal rounded =
+        BigDecimal.valueOf(value).round(new MathContext(digits, RoundingMode.HALF_UP));
     if (rounded.signum() == 0) {
       return "0";
     }
@@ -97,7 +98,11 @@ final class Readable {
 
   /** A share of energy in per cent; a dash if there is none. */
   static String share(double ratio) {
-    return Double.isFinite(ratio) ? LevelText.text(100.0 * ratio) + " %" : NONE;
+    if (!Double.isFinite(ratio)) {
+      return NONE;
+    }
+    String text = LevelText.text(100.0 * ratio);
+    return ratio > 0.0 && text.equals("0.0") ? "under 0.1 %" : text + " %";
   }
 
   /** Name of a band by its position 0 .. 27: {@code 31.5 Hz}, {@code 1.25 kHz}. */
