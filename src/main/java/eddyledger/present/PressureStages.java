@@ -13,7 +13,7 @@ import java.util.stream.IntStream;
 /** Writes the stages of the pressure on the wall: its spectrum at a point, its cross-spectrum. */
 final class PressureStages {
   private static final int POINTS = 81;
-  private static final String AFTER = "wall pressure after ";
+  private static final String AFTER = ", after ";
 
   private final TraceSource source;
 
@@ -45,8 +45,7 @@ final class PressureStages {
 
   private String model() {
     String meaning = source.steps().find("Gpp").orElseThrow().meaning();
-    String after = meaning.substring(meaning.indexOf(AFTER) + AFTER.length());
-    return after.substring(0, after.indexOf(','));
+    return meaning.substring(meaning.lastIndexOf(AFTER) + AFTER.length());
   }
 
   StageText cross() {

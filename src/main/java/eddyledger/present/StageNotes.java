@@ -11,14 +11,21 @@ import java.util.regex.Pattern;
 
 /** The notes of a stage, gathered from its steps so that none is lost and none is told twice. */
 final class StageNotes {
-  private static final String DEFAULT = "default, nobody set it";
+  private static final String DEFAULT = "default, nobody set ";
+  private static final String MORE = "; ";
   private static final Pattern FILLED =
       Pattern.compile("^(.+?) ([-+0-9.eE]+) (\\S+) filled in (.+)$");
-  private static final Pattern ORIGIN = Pattern.compile("^(from |set on the panel).*");
 
-  /** What is always so and told in the table of all numbers. */
+  /** Steps whose notes are about ranges left, where they are not about what was filled in. */
+  private static final List<String> DOUBTED = List.of("Ue", "Gpp", "H");
+
+  /** What is always so, or told by the stage itself; the table of all numbers has it. */
   private static final List<String> ALWAYS =
-      List.of("edges simply supported", "radiation damping of both faces", "fitted at orders");
+      List.of(
+          "edges simply supported",
+          "radiation damping of both faces",
+          "fitted at orders",
+          "the measured level difference holds the whole path");
 
   private final List<TraceNote> doubts = new ArrayList<>();
   private final List<String> defaults = new ArrayList<>();
@@ -44,18 +51,19 @@ final class StageNotes {
   }
 
   private void read(TraceStep step) {
-    String told = step.meaning() + "; " + step.source() + "; " + step.note();
-    if (told.contains(DEFAULT) && !defaults.contains(name(step))) {
-      defaults.add(name(step));
+    String note = step.note();
+    if (note.startsWith(DEFAULT)) {
+      if (!defaults.contains(name(step))) {
+        defaults.add(name(step));
+      }
+      int more = note.indexOf(MORE);
+      note = more < 0 ? "" : note.substring(more + MORE.length());
     }
-    note(step.note());
+    note(step, note);
   }
 
-  private void note(String note) {
-    if (note.isEmpty() || note.equals(DEFAULT) || ORIGIN.matcher(note).matches()) {
-      return;
-    }
-    if (ALWAYS.stream().anyMatch(note::startsWith)) {
+  private void note(TraceStep step, String note) {
+    if (note.isEmpty() || ALWAYS.stream().anyMatch(note::startsWith)) {
       return;
     }
     Matcher matcher = FILLED.matcher(note);
@@ -63,13 +71,16 @@ final class StageNotes {
       filled.computeIfAbsent(matcher.group(4), rule -> new ArrayList<>()).add(matcher.group(1));
     } else if (note.startsWith("interpolated from octaves")) {
       others.add(new TraceNote(Kind.INTERPOLATED, "from octaves, linear in lg f"));
-    } else {
+    } else if (DOUBTED.contains(step.symbol())) {
       doubts.add(new TraceNote(Kind.DOUBT, Readable.sentence(note)));
+    } else {
+      others.add(new TraceNote(Kind.NOTE, printed(note)));
     }
   }
 
   private static String name(TraceStep step) {
     return switch (step.symbol()) {
+      case "IL" -> "lay-up";
       case "Gpp" -> "model of the wall-pressure spectrum";
       case "order_along", "order_across", "alpha_along", "alpha_across" ->
           "orders and decay rates of the cross-spectrum";
@@ -84,8 +95,8 @@ final class StageNotes {
         : String.join(", ", names.subList(0, last)) + " and " + names.get(last);
   }
 
-  private static String printed(String rule) {
-    String sentence = Readable.sentence(rule);
-    return Character.toLowerCase(sentence.charAt(0)) + sentence.substring(1);
+  /** As printed, with the first letter as it was. */
+  private static String printed(String text) {
+    return text.charAt(0) + Readable.sentence(text).substring(1);
   }
 }

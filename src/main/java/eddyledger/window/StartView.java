@@ -10,6 +10,7 @@ import java.awt.event.KeyEvent;
 import java.nio.file.Path;
 import javax.swing.BorderFactory;
 import javax.swing.JButton;
+import javax.swing.JComponent;
 import javax.swing.JLabel;
 import javax.swing.JPanel;
 import javax.swing.JScrollPane;
@@ -70,7 +71,10 @@ public final class StartView extends JPanel {
     scroll.setBorder(BorderFactory.createEmptyBorder());
     scroll.getVerticalScrollBar().setUnitIncrement(RecentCell.HEIGHT);
     Theme.named(this, "start", "Start page");
-    setTransferHandler(new FileDrop(actions::open));
+    // list and text area have handlers of their own, which would keep a dropped file to themselves
+    for (JComponent target : new JComponent[] {this, recent, caution}) {
+      target.setTransferHandler(new FileDrop(actions::open));
+    }
     addHierarchyListener(
         event -> {
           boolean showing = (event.getChangeFlags() & HierarchyEvent.SHOWING_CHANGED) != 0;

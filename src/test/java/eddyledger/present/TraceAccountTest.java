@@ -8,9 +8,12 @@ import eddyledger.ledger.LedgerRow;
 import eddyledger.ledger.ReceiverSheet;
 import eddyledger.ledger.RowKind;
 import eddyledger.ledger.State;
+import eddyledger.ledger.Trace;
+import eddyledger.ledger.TraceStep;
 import eddyledger.ledger.Way;
 import eddyledger.present.TraceNote.Kind;
 import java.util.List;
+import java.util.stream.Collectors;
 import org.junit.jupiter.api.Test;
 
 /** The account of a contribution of the example, as its reader meets it. */
@@ -61,6 +64,8 @@ class TraceAccountTest {
     assertThat(flow.sentence()).isEqualTo("Mach 0.74 times the local speed ratio 1.08.");
     assertThat(flow.origin()).isEqualTo("Mach from Cruise; ratio from Station A (calculation)");
     assertThat(flow.numbers()).startsWith("U_{e} = 1.08 · 0.74 · 296.4 = 236.9 m/s,");
+    assertThat(stage(account, "Wall pressure").sentence())
+        .isEqualTo("Efimtsov spectrum at a point, summed over each band.");
     TraceStage panel = stage(account, "Panel");
     assertThat(panel.sentence()).isEqualTo("33 pieces of Aluminium skin 1.4 mm, 500 by 180 mm.");
     assertThat(panel.origin())
@@ -108,6 +113,34 @@ class TraceAccountTest {
     assertThat(stage(account, "Zone").notes())
         .extracting(TraceNote::kind)
         .containsExactly(Kind.NOTE);
+  }
+
+  @Test
+  void noNoteOfTheTraceIsHidden() {
+    List<String> always =
+        List.of("edges simply", "radiation damping of both faces", "fitted at orders");
+    int seen = 0;
+    for (String panel : List.of("crown-a", "window-panes-left-a", "lower-side-left-e")) {
+      TraceAccount account = account(panel, Quillon.HOLD, 5);
+      String notes =
+          account.stages().stream()
+              .flatMap(stage -> stage.notes().stream())
+              .map(TraceNote::line)
+              .collect(Collectors.joining("\n"));
+      Trace trace = LEDGER.trace(panel, Quillon.HOLD, Quillon.ROW_2).orElseThrow();
+      for (TraceStep step : trace.steps()) {
+        if (step.note().isEmpty() || always.stream().anyMatch(step.note()::startsWith)) {
+          continue;
+        }
+        String needed =
+            step.note().contains("filled in")
+                ? step.meaning()
+                : Readable.sentence(step.note()).replace("Interpolated ", "");
+        assertThat(notes).as(step.symbol()).contains(needed);
+        seen++;
+      }
+    }
+    assertThat(seen).isGreaterThan(9);
   }
 
   @Test
