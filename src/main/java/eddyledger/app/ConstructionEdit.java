@@ -2,6 +2,7 @@ package eddyledger.app;
 
 import eddyledger.model.Construction;
 import eddyledger.model.Held;
+import eddyledger.model.InheritedSettings;
 import eddyledger.model.Panel;
 import eddyledger.model.PlateConstruction;
 import eddyledger.model.Settings;
@@ -41,12 +42,18 @@ public final class ConstructionEdit {
   /** Ids of the panels that a construction holds on. */
   public static List<String> panelsOf(Vehicle vehicle, String construction) {
     return TreePath.of(vehicle).stream()
-        .map(path -> path.node())
-        .filter(Panel.class::isInstance)
-        .map(node -> node.id())
-        .filter(
-            id -> slot(id).read(vehicle).map(Held::value).filter(construction::equals).isPresent())
+        .filter(path -> path.node() instanceof Panel)
+        .filter(path -> holds(vehicle, path, construction))
+        .map(path -> path.node().id())
         .toList();
+  }
+
+  private static boolean holds(Vehicle vehicle, TreePath path, String construction) {
+    return InheritedSettings.at(vehicle, path)
+        .find(Settings::construction)
+        .map(Held::value)
+        .filter(construction::equals)
+        .isPresent();
   }
 
   /** The construction that a panel's own copy was made from; empty if it has no own copy. */

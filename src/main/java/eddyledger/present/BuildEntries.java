@@ -98,7 +98,7 @@ final class BuildEntries {
                 ? "—"
                 : NumberText.text(mass, Quantity.SURFACE_MASS, Unit.SURFACE_MASS, 4))
         .unit(Unit.SURFACE_MASS, Quantity.SURFACE_MASS)
-        .origin(Double.isNaN(mass) ? "" : "density × thickness", false)
+        .origin(Double.isNaN(mass) ? "" : "worked out", false)
         .weight(Weight.FAINT);
   }
 

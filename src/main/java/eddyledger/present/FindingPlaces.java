@@ -11,6 +11,11 @@ import java.util.List;
 final class FindingPlaces {
   private static final String BY_CONDITION = ".by_condition.";
 
+  /** What is found about the layer as a whole stands under its thickness. */
+  private static final String WHOLE_LAYER = "boundary_layer";
+
+  private static final String FIRST_OF_LAYER = ".thickness_m";
+
   private FindingPlaces() {}
 
   /** The place of a panel, section, other source or the vehicle; empty if it is nowhere. */
@@ -44,6 +49,10 @@ final class FindingPlaces {
         return false;
       }
       plain = found.substring(0, special) + found.substring(end);
+    }
+    if (place.endsWith(WHOLE_LAYER + FIRST_OF_LAYER)
+        && plain.equals(place.substring(0, place.length() - FIRST_OF_LAYER.length()))) {
+      return true;
     }
     return plain.startsWith(place)
         && (plain.length() == place.length() || ".[".indexOf(plain.charAt(place.length())) >= 0);

@@ -69,7 +69,9 @@ final class NumberEntry<T> extends SlotEntry<T> {
     }
     NumberIn.Fallback fallback = number.fallback(context);
     if (fallback.computed()) {
-      return "worked out";
+      boolean layer =
+          slot() instanceof PartSlot<?, T> part && part.whole().read(context.vehicle()).isPresent();
+      return layer ? "worked out" : "";
     }
     return withUnit(NumberText.text(fallback.value(), number.quantity(), unit), unit);
   }

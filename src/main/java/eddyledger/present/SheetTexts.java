@@ -49,7 +49,15 @@ record SheetTexts(SheetContext context, List<Finding> findings, SheetStay stay) 
     return findings.stream()
         .filter(finding -> !place.isEmpty() && finding.place().equals(place))
         .filter(finding -> finding.severity().atLeast(Severity.WARNING))
+        .filter(this::ofThisCondition)
         .map(FindingPlaces::message)
         .toList();
+  }
+
+  /** What the computation says of a row begins with the condition it met it in. */
+  private boolean ofThisCondition(Finding finding) {
+    String start = "In condition \"";
+    return !finding.what().startsWith(start)
+        || finding.what().startsWith(start + context.selection().conditionId() + "\"");
   }
 }
