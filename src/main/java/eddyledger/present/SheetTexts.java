@@ -1,0 +1,63 @@
+package eddyledger.present;
+
+import eddyledger.check.Finding;
+import eddyledger.check.Severity;
+import java.util.ArrayList;
+import java.util.List;
+
+/**
+ * Puts the texts of the sheet together.
+ *
+ * @param context what the fields are read from
+ * @param findings what was found about the vehicle
+ * @param stay what is being typed
+ */
+record SheetTexts(SheetContext context, List<Finding> findings, SheetStay stay) {
+  SheetText text() {
+    List<SheetText.Group> groups = new ArrayList<>();
+    for (SheetEntries.Group group : SheetEntries.of(context)) {
+      List<SheetField> fields = group.entries().stream().map(this::field).toList();
+      groups.add(
+          new SheetText.Group(group.key(), group.heading(), group.note(), group.grid(), fields));
+    }
+    String row = context.row();
+    return new SheetText(
+        row,
+        SheetRow.name(context.vehicle(), row),
+        SheetRow.trail(context.vehicle(), row),
+        messages(),
+        groups,
+        context.trace().isPresent());
+  }
+
+  private SheetField field(Entry entry) {
+    SheetField plain = entry.show(context);
+    FieldBuilder field = FieldBuilder.of(plain);
+    List<String> places = plain.editable() ? entry.places(context) : List.of();
+    String condition = context.selection().conditionId();
+    findings.stream()
+        .filter(finding -> finding.severity().atLeast(Severity.WARNING))
+        .filter(finding -> FindingPlaces.meets(finding, places, condition))
+        .forEach(finding -> field.message(FindingPlaces.message(finding)));
+    stay.typed(entry.key()).ifPresent(field::text);
+    stay.refusal(entry.key()).ifPresent(words -> field.message(SheetMessage.error(words)));
+    return field.build();
+  }
+
+  private List<SheetMessage> messages() {
+    String place = FindingPlaces.ofRow(context.vehicle(), context.row());
+    return findings.stream()
+        .filter(finding -> !place.isEmpty() && finding.place().equals(place))
+        .filter(finding -> finding.severity().atLeast(Severity.WARNING))
+        .filter(this::ofThisCondition)
+        .map(FindingPlaces::message)
+        .toList();
+  }
+
+  /** What the computation says of a row begins with the condition it met it in. */
+  private boolean ofThisCondition(Finding finding) {
+    String start = "In condition \"";
+    return !finding.what().startsWith(start)
+        || finding.what().startsWith(start + context.selection().conditionId() + "\"");
+  }
+}

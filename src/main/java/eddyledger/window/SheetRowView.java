@@ -1,0 +1,157 @@
+package eddyledger.window;
+
+import eddyledger.chart.Digits;
+import eddyledger.chart.Palette;
+import eddyledger.check.Severity;
+import eddyledger.ledger.State;
+import eddyledger.present.SheetField;
+import eddyledger.present.SheetField.Kind;
+import eddyledger.present.SheetField.Weight;
+import eddyledger.present.SheetMessage;
+import eddyledger.present.SheetPresenter;
+import java.awt.Color;
+import java.awt.Cursor;
+import java.awt.event.MouseAdapter;
+import java.awt.event.MouseEvent;
+import javax.swing.JButton;
+import javax.swing.JComponent;
+import javax.swing.JLabel;
+import javax.swing.JPanel;
+import net.miginfocom.swing.MigLayout;
+
+/** One field of the sheet: label, value, unit, origin or way back, and what is said below it. */
+final class SheetRowView extends JPanel {
+  private static final int MESSAGE_WIDTH = 214;
+  private static final int LONGEST_NUMBER = 12;
+  private static final int CHOICE = 118;
+  private static final int WIDE_CHOICE = 156;
+  private static final int ROOM_FOR_ARROW = 25;
+
+  private final SheetPresenter presenter;
+  private final SheetInput input;
+  private final SheetMenu menu;
+  private final MigLayout layout;
+  private final JLabel label = new JLabel();
+  private final JLabel unit = new JLabel();
+  private final JLabel origin = new JLabel();
+  private final JButton back = new LinkButton(new BackIcon(), "");
+  private final JButton link = new LinkButton(null, "");
+  private final WrapText message = new WrapText(MESSAGE_WIDTH);
+  private SheetField shown;
+
+  SheetRowView(SheetField field, SheetPresenter presenter) {
+    this.presenter = presenter;
+    input = SheetInput.of(field, presenter);
+    menu = new SheetMenu(presenter);
+    layout =
+        new MigLayout(
+            "insets 0, gap 0, hidemode 3, novisualpadding",
+            "[98!][78!]6[34!]4[grow,fill]",
+            "[22::,center][]0[]");
+    setLayout(layout);
+    setOpaque(false);
+    label.setFont(Theme.body());
+    label.setLabelFor(input.component());
+    unit.setFont(Theme.small());
+    origin.setFont(Theme.small());
+    add(label, "cell 0 0, wmin 0, wmax 96");
+    add(input.component(), place(field));
+    add(unit, "cell 2 0, wmin 0");
+    String behind = field.kind() == Kind.CHOICE ? "cell 1 0, gapleft 4" : "cell 3 0";
+    add(origin, behind + ", wmin 0, growx");
+    add(back, behind + ", wmin 0, growx, h 20!");
+    add(message, "cell 1 1 3 1, growx, wmin 0, gapbottom 4");
+    add(link, "cell 1 2 3 1, h 20!, wmin 0");
+    input.component().setComponentPopupMenu(menu);
+    back.addActionListener(e -> presenter.back(shown.key()));
+    link.addActionListener(e -> presenter.link(shown.key()));
+    unit.addMouseListener(
+        new MouseAdapter() {
+          @Override
+          public void mousePressed(MouseEvent e) {
+            if (!shown.units().isEmpty()) {
+              menu.show(unit, 0, unit.getHeight());
+            }
+          }
+        });
+  }
+
+  private static String place(SheetField field) {
+    boolean rest =
+        field.kind() == Kind.TEXT || field.kind() == Kind.SHOWN && field.unit().isEmpty();
+    if (rest) {
+      return "cell 1 0 3 1, growx, wmin 0" + (field.kind() == Kind.TEXT ? ", h 20!" : "");
+    }
+    if (field.kind() == Kind.CHOICE) {
+      return "cell 1 0 3 1, h 20!, w " + (fits(field) ? CHOICE : WIDE_CHOICE) + "!";
+    }
+    boolean wide = field.text().length() > LONGEST_NUMBER;
+    return (wide ? "cell 1 0 2 1, w 118!" : "cell 1 0, w 78!") + ", h 20!";
+  }
+
+  /** Whether a choice is aligned with the fields above it; else it leaves a short origin only. */
+  private static boolean fits(SheetField field) {
+    return Digits.width(Theme.body(), field.text()) + ROOM_FOR_ARROW <= CHOICE;
+  }
+
+  /** The component that takes the focus. */
+  JComponent target() {
+    return input.component();
+  }
+
+  /** Shows the field as it stands. */
+  void show(SheetField field) {
+    shown = field;
+    Palette palette = Theme.palette();
+    layout.setComponentConstraints(input.component(), place(field));
+    label.setText(field.label());
+    label.setToolTipText(field.label());
+    boolean faint = !field.own() && field.weight() != Weight.RESULT;
+    label.setForeground(faint ? palette.ink2() : palette.ink());
+    unit.setText(field.unit());
+    unit.setVisible(field.kind() != Kind.CHOICE && field.text().length() <= LONGEST_NUMBER);
+    unit.setForeground(palette.ink2());
+    boolean several = !field.units().isEmpty();
+    unit.setCursor(several ? Cursor.getPredefinedCursor(Cursor.HAND_CURSOR) : null);
+    unit.setToolTipText(several ? "Click for other units" : null);
+    input.show(field);
+    menu.show(field);
+    origin(field, palette);
+    link.setVisible(!field.link().isEmpty());
+    link.setText(field.link());
+    link.setForeground(palette.accent());
+    Theme.named(link, "sheet." + field.key() + ".link", field.label() + ": " + field.link());
+    message(message, field.message(), palette);
+  }
+
+  private void origin(SheetField field, Palette palette) {
+    boolean way = !field.back().isEmpty();
+    boolean special = field.only().on();
+    origin.setVisible(!way && field.kind() != Kind.TEXT);
+    origin.setText(field.origin());
+    origin.setToolTipText(field.origin().isEmpty() ? null : field.origin());
+    State state = field.state();
+    boolean margin = field.key().equals("margin") && !field.origin().isEmpty();
+    boolean fresh = margin && field.weight() == Weight.RESULT;
+    origin.setIcon(margin ? new MarkIcon(state) : null);
+    Color ink = field.own() ? palette.ink() : palette.ink2();
+    origin.setForeground(fresh ? palette.stateText(state) : ink);
+    origin.setFont(fresh ? Theme.strong(12) : Theme.small());
+    back.setVisible(way);
+    boolean narrow = field.kind() == Kind.CHOICE && !fits(field);
+    back.setText(narrow ? "back" : special ? field.origin() : field.back());
+    back.setForeground(palette.ink2());
+    back.setToolTipText(SheetInput.tip(field.origin() + "; " + field.back()));
+    Theme.named(back, "sheet." + field.key() + ".back", field.label() + ": " + field.back());
+  }
+
+  /** Shows a message in the ink of its severity; hides the text if there is none. */
+  static void message(WrapText text, SheetMessage message, Palette palette) {
+    text.setVisible(message != null);
+    if (message != null) {
+      text.setText(message.text());
+      boolean error = message.severity().atLeast(Severity.ERROR);
+      text.setForeground(palette.stateText(error ? State.OVER : State.TIGHT));
+    }
+  }
+}

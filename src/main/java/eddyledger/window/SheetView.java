@@ -1,0 +1,116 @@
+package eddyledger.window;
+
+import eddyledger.present.SheetPresenter;
+import java.awt.BorderLayout;
+import java.awt.Dimension;
+import java.awt.KeyboardFocusManager;
+import java.awt.Rectangle;
+import java.beans.PropertyChangeListener;
+import javax.swing.BorderFactory;
+import javax.swing.JButton;
+import javax.swing.JComponent;
+import javax.swing.JPanel;
+import javax.swing.JScrollPane;
+import javax.swing.SwingUtilities;
+
+/** The sheet: the form of the selected row, at the right of the desk. */
+public final class SheetView extends JPanel {
+  private static final int WIDTH = 348;
+  private static final int LEAST = 300;
+  private static final int LINES_AROUND = 30;
+
+  private final SheetPresenter presenter;
+  private final JButton trace = new LinkButton(null, "How this level comes about");
+  private final SheetForm form;
+  private final PropertyChangeListener follow = event -> followFocus(event.getNewValue());
+  private String row = "";
+
+  /**
+   * A view of a presenter's sheet.
+   *
+   * @param showTrace shows the account of the selected panel's level
+   */
+  public SheetView(SheetPresenter presenter, Runnable showTrace) {
+    super(new BorderLayout());
+    this.presenter = presenter;
+    trace.addActionListener(event -> showTrace.run());
+    Theme.named(trace, "sheet.trace", trace.getText());
+    form = new SheetForm(presenter, trace);
+    JScrollPane scroll =
+        new JScrollPane(
+            form, JScrollPane.VERTICAL_SCROLLBAR_AS_NEEDED, JScrollPane.HORIZONTAL_SCROLLBAR_NEVER);
+    scroll.setBorder(BorderFactory.createEmptyBorder());
+    scroll.getVerticalScrollBar().setUnitIncrement(22);
+    add(scroll);
+    Theme.named(this, "sheet", "Sheet of the selected row");
+    presenter.listen(this::refresh);
+    refresh();
+  }
+
+  private void refresh() {
+    trace.setForeground(Theme.palette().accent());
+    form.getParent().setBackground(Theme.palette().paper());
+    var text = presenter.text();
+    form.show(text);
+    if (!text.row().equals(row)) {
+      row = text.row();
+      form.scrollRectToVisible(new Rectangle(0, 0, 1, 1));
+    }
+  }
+
+  @Override
+  public void updateUI() {
+    super.updateUI();
+    if (form != null) {
+      // colours of the theme are set field by field
+      SwingUtilities.invokeLater(this::refresh);
+    }
+  }
+
+  /** Puts the focus into a field and brings it into sight; does nothing if there is none. */
+  public void focusField(String key) {
+    JComponent target = form.target(key);
+    if (target != null) {
+      reveal(target);
+      target.requestFocusInWindow();
+    }
+  }
+
+  @Override
+  public void addNotify() {
+    super.addNotify();
+    focusManager().addPropertyChangeListener("focusOwner", follow);
+  }
+
+  @Override
+  public void removeNotify() {
+    focusManager().removePropertyChangeListener("focusOwner", follow);
+    super.removeNotify();
+  }
+
+  private static KeyboardFocusManager focusManager() {
+    return KeyboardFocusManager.getCurrentKeyboardFocusManager();
+  }
+
+  private void followFocus(Object owner) {
+    if (owner instanceof JComponent component && SwingUtilities.isDescendingFrom(component, form)) {
+      reveal(component);
+    }
+  }
+
+  private static void reveal(JComponent component) {
+    component.scrollRectToVisible(
+        new Rectangle(
+            0, -LINES_AROUND, component.getWidth(), component.getHeight() + 2 * LINES_AROUND));
+  }
+
+  @Override
+  public Dimension getPreferredSize() {
+    return new Dimension(WIDTH, super.getPreferredSize().height);
+  }
+
+  @Override
+  public Dimension getMinimumSize() {
+    return new Dimension(LEAST, 0);
+  }
+}

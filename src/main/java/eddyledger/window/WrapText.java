@@ -1,0 +1,49 @@
+package eddyledger.window;
+
+import java.awt.Dimension;
+import javax.swing.JTextArea;
+
+/** Text that wraps at its width and takes the height it needs; only to be read. */
+final class WrapText extends JTextArea {
+  private static final int TALL = 10_000;
+
+  private final int usual;
+  private int last;
+
+  /** With the width taken for granted before it is laid out. */
+  WrapText(int usualWidth) {
+    usual = usualWidth;
+    setEditable(false);
+    setFocusable(false);
+    setLineWrap(true);
+    setWrapStyleWord(true);
+    setOpaque(false);
+    setBorder(null);
+    setFont(Theme.small());
+  }
+
+  @Override
+  public Dimension getPreferredSize() {
+    int width = getWidth() > 0 ? getWidth() : usual;
+    int height = getHeight();
+    // a text area says how high it is only once it has its width
+    super.setBounds(getX(), getY(), width, TALL);
+    Dimension wrapped = super.getPreferredSize();
+    super.setBounds(getX(), getY(), width, height);
+    return new Dimension(usual, wrapped.height);
+  }
+
+  @Override
+  public Dimension getMinimumSize() {
+    return new Dimension(0, getPreferredSize().height);
+  }
+
+  @Override
+  public void setBounds(int x, int y, int width, int height) {
+    super.setBounds(x, y, width, height);
+    if (width != last) {
+      last = width;
+      javax.swing.SwingUtilities.invokeLater(this::revalidate);
+    }
+  }
+}
