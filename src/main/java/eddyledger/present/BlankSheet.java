@@ -24,13 +24,8 @@ import java.util.Optional;
 final class BlankSheet {
   private BlankSheet() {}
 
-  /**
-   * The sheet of a receiver in a condition; empty if the vehicle has none of these ids.
-   *
-   * @param why why there are no numbers
-   */
-  static Optional<ReceiverSheet> of(
-      Vehicle vehicle, String conditionId, String receiverId, String why) {
+  /** The sheet of a receiver in a condition; empty if the vehicle has none of these ids. */
+  static Optional<ReceiverSheet> of(Vehicle vehicle, String conditionId, String receiverId) {
     Optional<OperatingCondition> condition =
         vehicle.conditions().stream().filter(it -> it.id().equals(conditionId)).findFirst();
     Optional<Receiver> receiver =
@@ -39,23 +34,22 @@ final class BlankSheet {
       return Optional.empty();
     }
     List<LedgerRow> rows = new ArrayList<>();
-    rows.add(row(vehicle.id(), "", 0, vehicle.name(), RowKind.TOTAL, why));
+    rows.add(row(vehicle.id(), "", 0, vehicle.name(), RowKind.TOTAL));
     for (TreePath path : TreePath.of(vehicle)) {
       RowKind kind = path.node() instanceof Panel ? RowKind.PANEL : RowKind.SECTION;
       int depth = path.positions().size();
       String parent = path.parentId(vehicle);
-      rows.add(row(path.node().id(), parent, depth, path.node().name(), kind, why));
+      rows.add(row(path.node().id(), parent, depth, path.node().name(), kind));
     }
     for (OtherSource source : vehicle.otherSources()) {
       if (source.condition().equals(conditionId) && source.receiver().equals(receiverId)) {
-        rows.add(row(source.id(), vehicle.id(), 1, source.name(), RowKind.OTHER, why));
+        rows.add(row(source.id(), vehicle.id(), 1, source.name(), RowKind.OTHER));
       }
     }
     return Optional.of(new ReceiverSheet(condition.get(), receiver.get(), rows, List.of()));
   }
 
-  private static LedgerRow row(
-      String id, String parent, int depth, String name, RowKind kind, String why) {
+  private static LedgerRow row(String id, String parent, int depth, String name, RowKind kind) {
     return new LedgerRow(
         id,
         parent,
@@ -67,6 +61,6 @@ final class BlankSheet {
         BandSpectrum.constant(Double.NaN),
         Judgement.NONE,
         Status.MISSING,
-        why);
+        "");
   }
 }

@@ -33,6 +33,6 @@ final class Headings {
     if (!state.stale()) {
       return "levels in dB(A)";
     }
-    return state.unusable() ? "earlier levels, see findings" : "earlier levels, computing\u2026";
+    return state.unusable() ? "earlier, see findings" : "earlier levels\u2026";
   }
 }

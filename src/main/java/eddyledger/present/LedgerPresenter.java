@@ -30,6 +30,7 @@ public final class LedgerPresenter {
   public LedgerPresenter(ProjectState state) {
     this.state = state;
     open.reset();
+    followSelection();
     rebuild();
     state.listen(this::changed);
   }
@@ -130,7 +131,7 @@ public final class LedgerPresenter {
     open.open(tree.root());
     if (desk.orElseThrow().counted()) {
       arranged = true;
-      new WorstLine(tree).find().ifPresent(open::reveal);
+      new WorstLine(tree).find().ifPresent(open::show);
     }
     return true;
   }

@@ -5,7 +5,6 @@ import eddyledger.ledger.Judgement;
 import eddyledger.ledger.LedgerRow;
 import eddyledger.ledger.ReceiverSheet;
 import eddyledger.ledger.RowKind;
-import eddyledger.ledger.Status;
 import eddyledger.ledger.Way;
 import java.util.ArrayList;
 import java.util.HashMap;
@@ -77,7 +76,7 @@ final class LedgerTree {
     Contributed sum = sheet.others();
     List<String> reasons =
         sheet.rows().stream()
-            .filter(row -> row.kind() == RowKind.OTHER && row.status() != Status.OK)
+            .filter(row -> row.kind() == RowKind.OTHER && !Reasons.full(row).isEmpty())
             .map(row -> row.name() + ": " + row.reason())
             .toList();
     return new LedgerRow(

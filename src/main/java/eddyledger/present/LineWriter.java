@@ -2,7 +2,6 @@ package eddyledger.present;
 
 import eddyledger.ledger.LedgerRow;
 import eddyledger.ledger.RowKind;
-import eddyledger.ledger.Status;
 import eddyledger.ledger.Way;
 import eddyledger.present.BandStrip.Fill;
 import eddyledger.present.LedgerLine.Twig;
@@ -14,6 +13,7 @@ final class LineWriter {
   private final LedgerTree tree;
   private final VehicleFacts facts;
   private final double totalEnergy;
+  private final LineNames names = new LineNames();
 
   /** For the rows of a tree. */
   LineWriter(LedgerTree tree, VehicleFacts facts) {
@@ -26,8 +26,7 @@ final class LineWriter {
   LedgerLine line(LedgerNode node, boolean open) {
     LedgerRow row = node.row();
     boolean all = node.key().way() == Way.ALL;
-    String above = node.above() == null ? "" : node.above().row().name();
-    String name = all ? ShortName.within(row.name(), above) : LineWords.wayName(row.way());
+    String name = all ? names.of(node) : LineWords.wayName(row.way());
     double share = row.meanSquareA() / totalEnergy;
     boolean shared = Double.isFinite(share);
     double allowance = row.judgement().allowance();
@@ -78,7 +77,8 @@ final class LineWriter {
   private BandStrip strip(LedgerRow row) {
     BandSpectrum levels = BandLevels.weighted(row);
     int peak = BandLevels.peak(levels);
-    boolean none = peak < 0 || row.status() == Status.MISSING || row.status() == Status.FAILED;
+    // where a band is missing there is no level, and the reason says more than the bars would
+    boolean none = peak < 0 || !Double.isFinite(row.levelA());
     return new BandStrip(levels, none ? -1 : peak, fill(row), none ? Reasons.brief(row) : "");
   }
 

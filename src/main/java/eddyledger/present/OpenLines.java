@@ -38,6 +38,12 @@ final class OpenLines {
     return opened;
   }
 
+  /** Opens a node and everything above it. */
+  void show(LedgerNode node) {
+    reveal(node);
+    open(node);
+  }
+
   /** Opens every line that has lines below it. */
   void openAll(LedgerTree tree) {
     tree.nodes().forEach(this::open);

@@ -29,7 +29,7 @@ record SheetOnDesk(ReceiverSheet sheet, Vehicle vehicle, boolean counted) {
       return sheet.map(it -> new SheetOnDesk(it, computed, true));
     }
     Vehicle now = state.vehicle();
-    return BlankSheet.of(now, at.conditionId(), at.receiverId(), why(state))
+    return BlankSheet.of(now, at.conditionId(), at.receiverId())
         .map(it -> new SheetOnDesk(it, now, false));
   }
 

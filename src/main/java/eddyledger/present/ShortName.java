@@ -1,7 +1,9 @@
 package eddyledger.present;
 
+import java.util.HashMap;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 
 /** Names made shorter where what is left still tells them apart. */
 final class ShortName {
@@ -22,10 +24,38 @@ final class ShortName {
     return comma <= 0 ? name : name.substring(0, comma).strip();
   }
 
-  /** A name without the section it ends in: "Crown, station E" within "Station E" is "Crown". */
-  static String within(String name, String section) {
-    String end = ", " + section.toLowerCase(Locale.ROOT);
-    boolean ends = name.toLowerCase(Locale.ROOT).endsWith(end) && name.length() > end.length();
-    return ends ? name.substring(0, name.length() - end.length()) : name;
+  /**
+   * A name without the section it names: within "Station E", "Crown, station E aft" is "Crown" and
+   * "Station E, aft cabin" is "Aft cabin", unless a sibling becomes the same.
+   *
+   * @param sections names of the sections it is within
+   * @param counts how often each short name stands among its siblings
+   */
+  static String within(String name, List<String> sections, Map<String, Integer> counts) {
+    String cut = cut(name, sections);
+    return counts.getOrDefault(cut, 0) > 1 ? name : cut;
+  }
+
+  /** How often each short name stands among siblings. */
+  static Map<String, Integer> counts(List<String> siblings, List<String> sections) {
+    Map<String, Integer> counts = new HashMap<>();
+    siblings.forEach(name -> counts.merge(cut(name, sections), 1, Integer::sum));
+    return counts;
+  }
+
+  private static String cut(String name, List<String> sections) {
+    String lower = name.toLowerCase(Locale.ROOT);
+    for (String section : sections) {
+      int at = lower.indexOf(", " + section.toLowerCase(Locale.ROOT));
+      if (at > 0) {
+        return name.substring(0, at);
+      }
+      String start = section.toLowerCase(Locale.ROOT) + ", ";
+      if (lower.startsWith(start) && lower.length() > start.length()) {
+        String rest = name.substring(start.length());
+        return Character.toUpperCase(rest.charAt(0)) + rest.substring(1);
+      }
+    }
+    return name;
   }
 }
