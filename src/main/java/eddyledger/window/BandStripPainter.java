@@ -8,7 +8,6 @@ import eddyledger.quantity.Bands;
 import java.awt.BasicStroke;
 import java.awt.Color;
 import java.awt.Graphics2D;
-import java.awt.Paint;
 import java.awt.geom.Rectangle2D;
 
 /** Paints the bars of a band strip. */
@@ -19,14 +18,13 @@ final class BandStripPainter {
   private static final BasicStroke EDGE = new BasicStroke(0.9f);
 
   private final Palette palette;
-  private final Paint hatch;
-  private final Paint peakHatch;
+  private final Hatching hatch;
+  private final Hatching peakHatch;
 
   BandStripPainter(Palette palette) {
-    Color clear = new Color(0, true);
     this.palette = palette;
-    this.hatch = Hatch.RISING.paint(palette.bar(), clear);
-    this.peakHatch = Hatch.RISING.paint(palette.peakBar(), clear);
+    this.hatch = new Hatching(Hatch.RISING, palette.bar());
+    this.peakHatch = new Hatching(Hatch.RISING, palette.peakBar());
   }
 
   /** Where the middle of a band stands in a cell of a width, pixels. */
@@ -80,7 +78,7 @@ final class BandStripPainter {
         g.fill(bar);
       }
       case HATCHED -> {
-        g.setPaint(peak ? peakHatch : hatch);
+        g.setPaint((peak ? peakHatch : hatch).on(g));
         g.fill(bar);
         g.setColor(ink);
         g.fill(new Rectangle2D.Double(bar.x, bar.y, bar.width, 1.0));

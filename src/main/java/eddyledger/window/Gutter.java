@@ -1,13 +1,9 @@
 package eddyledger.window;
 
-import eddyledger.chart.FillPaints;
-import eddyledger.chart.Palette;
-import eddyledger.chart.StackFill;
 import eddyledger.chart.StackPart;
 import eddyledger.chart.StackParts;
 import eddyledger.ledger.ReceiverSheet;
 import eddyledger.present.LedgerLine;
-import java.awt.Paint;
 import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
@@ -16,15 +12,11 @@ import java.util.Optional;
 
 /** The marks in the gutter: the ledger is the legend of the picture. */
 final class Gutter {
-  private final FillPaints fills;
-  private final Map<StackFill, Paint> paints = new HashMap<>();
-
-  Gutter(Palette palette) {
-    fills = new FillPaints(palette);
-  }
+  private Gutter() {}
 
   /** One mark for each line; null where a line is in no part, or in several. */
-  List<GutterMark> marks(Optional<ReceiverSheet> sheet, String selectedId, List<LedgerLine> lines) {
+  static List<GutterMark> marks(
+      Optional<ReceiverSheet> sheet, String selectedId, List<LedgerLine> lines) {
     Map<String, StackPart> parts = new HashMap<>();
     sheet.ifPresent(
         it -> {
@@ -37,14 +29,9 @@ final class Gutter {
     for (int i = 0; i < lines.size(); i++) {
       StackPart part = parts.get(lines.get(i).id());
       StackPart below = i + 1 < lines.size() ? parts.get(lines.get(i + 1).id()) : null;
-      marks.add(part == null ? null : mark(part.fill(), part == above, part == below));
+      marks.add(part == null ? null : new GutterMark(part.fill(), part == above, part == below));
       above = part;
     }
     return marks;
-  }
-
-  private GutterMark mark(StackFill fill, boolean joinedAbove, boolean joinedBelow) {
-    Paint paint = paints.computeIfAbsent(fill, fills::of);
-    return new GutterMark(paint, fills.edged(fill), joinedAbove, joinedBelow);
   }
 }

@@ -66,7 +66,7 @@ final class LedgerCell extends JComponent implements TableCellRenderer {
     g.fillRect(0, 0, getWidth(), getHeight());
     ink.paint(g, line, column, heading.get(), getWidth(), getHeight());
     if (mark != null) {
-      GutterPainter.paint(g, mark, getHeight(), row * getHeight(), ink.palette().bar());
+      ink.gutter(g, mark, getHeight(), row * getHeight());
     }
     if (selected && focused && column == LedgerColumn.NAME) {
       ink.focus(g, getHeight());

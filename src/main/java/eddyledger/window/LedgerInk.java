@@ -28,6 +28,7 @@ final class LedgerInk {
   private final Palette palette;
   private final Lettering lettering;
   private final BandStripPainter strips;
+  private final GutterPainter gutter;
   private final Font body = Theme.body();
   private final Font strong = Theme.strong(12);
   private final Font small = Theme.small();
@@ -36,6 +37,7 @@ final class LedgerInk {
     this.palette = palette;
     this.lettering = lettering;
     this.strips = new BandStripPainter(palette);
+    this.gutter = new GutterPainter(palette);
   }
 
   Palette palette() {
@@ -66,6 +68,11 @@ final class LedgerInk {
       g.setColor(palette.hairline());
       g.fillRect(0, 0, w, 1);
     }
+  }
+
+  /** Paints a mark of the gutter into a line that stands at a height in the table. */
+  void gutter(Graphics2D g, GutterMark mark, int height, int top) {
+    gutter.paint(g, mark, height, top);
   }
 
   /** Paints what marks the selected line while the ledger has the focus. */

@@ -1,6 +1,5 @@
 package eddyledger.window;
 
-import eddyledger.chart.Palette;
 import eddyledger.present.LedgerColumn;
 import eddyledger.present.LedgerLine;
 import eddyledger.present.LedgerPresenter;
@@ -28,8 +27,6 @@ public final class LedgerView extends JPanel {
   private final JTable table = new JTable(model);
   private final JScrollPane scroll = new JScrollPane(table);
   private final LedgerCell cell;
-  private Palette palette;
-  private Gutter gutter;
   private boolean following;
   private String shown = "";
 
@@ -92,11 +89,7 @@ public final class LedgerView extends JPanel {
     Color paper = Theme.palette().paper();
     setBackground(paper);
     scroll.getViewport().setBackground(paper);
-    if (Theme.palette() != palette) {
-      palette = Theme.palette();
-      gutter = new Gutter(palette);
-    }
-    cell.gutter(gutter.marks(presenter.sheet(), presenter.selectedId(), presenter.lines()));
+    cell.gutter(Gutter.marks(presenter.sheet(), presenter.selectedId(), presenter.lines()));
     following = true;
     boolean reshaped = model.show(presenter.lines());
     int row = presenter.selectedIndex();

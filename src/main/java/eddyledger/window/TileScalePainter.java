@@ -9,7 +9,6 @@ import eddyledger.present.TileScale;
 import java.awt.BasicStroke;
 import java.awt.Color;
 import java.awt.Graphics2D;
-import java.awt.Paint;
 import java.awt.geom.Ellipse2D;
 import java.awt.geom.Line2D;
 import java.awt.geom.Rectangle2D;
@@ -22,14 +21,13 @@ final class TileScalePainter {
   private static final double HALO = 1.5;
   private static final double BRACKET = 7.5;
   private static final double CAP = 2.5;
-  private static final Color CLEAR = new Color(0, true);
 
   private final Palette palette;
-  private final Paint reserve;
+  private final Hatching reserve;
 
   TileScalePainter(Palette palette) {
     this.palette = palette;
-    this.reserve = Hatch.RISING.paint(palette.ink3(), CLEAR);
+    this.reserve = new Hatching(Hatch.RISING, palette.ink3());
   }
 
   /** Paints from x to x + width around y; on a ground of the colour given. */
@@ -42,7 +40,7 @@ final class TileScalePainter {
       double allowed = x + width * scale.allowed();
       g.setPaint(ground);
       g.fill(new Rectangle2D.Double(allowed, y - HATCH, target - allowed, 2.0 * HATCH));
-      g.setPaint(reserve);
+      g.setPaint(reserve.on(g));
       g.fill(new Rectangle2D.Double(allowed, y - HATCH, target - allowed, 2.0 * HATCH));
       g.setColor(palette.ink());
       g.fill(new Rectangle2D.Double(target - 0.75, y - TICK, 1.5, 2.0 * TICK));

@@ -4,6 +4,8 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import eddyledger.app.ProjectState;
 import eddyledger.chart.Palette;
+import eddyledger.chart.StackFill;
+import eddyledger.chart.StackFill.Kind;
 import eddyledger.ledger.Ledger;
 import eddyledger.present.LedgerColumn;
 import eddyledger.present.LedgerLine;
@@ -195,15 +197,15 @@ class LedgerViewTest {
         () -> {
           LedgerPresenter presenter = new LedgerPresenter(state);
           List<LedgerLine> lines = presenter.lines();
-          List<GutterMark> marks =
-              new Gutter(Palette.LIGHT).marks(presenter.sheet(), presenter.selectedId(), lines);
+          List<GutterMark> marks = Gutter.marks(presenter.sheet(), presenter.selectedId(), lines);
           assertThat(marks).hasSameSizeAs(lines);
           assertThat(marks.get(0)).isNull();
-          assertThat(marks.get(1).paint()).isEqualTo(Palette.LIGHT.series().get(0));
+          assertThat(marks.get(1).fill()).isEqualTo(new StackFill(Kind.SERIES, 0));
           assertThat(marks.get(1).joinedAbove()).isFalse();
           assertThat(marks.get(1).joinedBelow()).isTrue();
-          assertThat(marks.get(2).paint()).isSameAs(marks.get(1).paint());
-          assertThat(marks.get(lines.size() - 1).edged()).isTrue();
+          assertThat(marks.get(2).fill()).isEqualTo(marks.get(1).fill());
+          assertThat(marks.get(2).joinedAbove()).isTrue();
+          assertThat(marks.get(lines.size() - 1).fill().kind()).isEqualTo(Kind.OTHER);
         });
   }
 
