@@ -43,6 +43,11 @@ public record ReceiverSheet(
     return Contributed.of(top);
   }
 
+  /** The mean squares of the other sources together, Pa². */
+  public Contributed others() {
+    return Contributed.of(rows.stream().filter(row -> row.kind() == RowKind.OTHER).toList());
+  }
+
   /** Names it: receiver and condition. */
   public String title() {
     return receiver.id() + " in " + condition.id();
