@@ -9,19 +9,36 @@ import eddyledger.quantity.Bands;
  * <p>Slice i counts from 0 to 28 · perBand − 1; band b has the slices b · perBand up to (b + 1) ·
  * perBand − 1.
  *
- * @param perBand slices in each band, 1 or more
+ * <p>Immutable; edges and centres are worked out once.
  */
-public record BandSlices(int perBand) {
+public final class BandSlices {
   private static final int FOR_ORDER_ONE = 6;
   private static final int FOR_HIGHER_ORDERS = 12;
 
+  private final int perBand;
+  private final double[] edges;
+  private final double[] centres;
+
   /**
-   * Checks the number.
+   * So many slices in each band.
    *
    * @throws IllegalArgumentException if it is below 1
    */
-  public BandSlices {
-    Require.atLeastOne(perBand, "slices per band");
+  public BandSlices(int perBand) {
+    this.perBand = Require.atLeastOne(perBand, "slices per band");
+    edges = new double[perBand * Bands.COUNT + 1];
+    for (int band = 0; band < Bands.COUNT; band++) {
+      double lower = Bands.lower(band);
+      double ratio = Bands.upper(band) / lower;
+      for (int step = 0; step < perBand; step++) {
+        edges[band * perBand + step] = lower * Math.pow(ratio, step / (double) perBand);
+      }
+    }
+    edges[edges.length - 1] = Bands.upper(Bands.COUNT - 1);
+    centres = new double[count()];
+    for (int i = 0; i < centres.length; i++) {
+      centres[i] = Math.sqrt(edges[i] * edges[i + 1]);
+    }
   }
 
   /**
@@ -35,6 +52,11 @@ public record BandSlices(int perBand) {
     return new BandSlices(order <= 1 ? FOR_ORDER_ONE : FOR_HIGHER_ORDERS);
   }
 
+  /** Slices in each band. */
+  public int perBand() {
+    return perBand;
+  }
+
   /** Number of slices in all bands. */
   public int count() {
     return perBand * Bands.COUNT;
@@ -42,39 +64,26 @@ public record BandSlices(int perBand) {
 
   /** Lower edge of a slice, Hz. */
   public double lower(int slice) {
-    return edge(slice / perBand, slice % perBand);
+    return edges[slice];
   }
 
-  /** Upper edge of a slice, Hz. */
+  /** Upper edge of a slice, Hz: the lower edge of the next one, to the bit. */
   public double upper(int slice) {
-    return edge(slice / perBand, slice % perBand + 1);
+    return edges[slice + 1];
   }
 
   /** Geometric centre of a slice, Hz. */
   public double centre(int slice) {
-    return Math.sqrt(lower(slice) * upper(slice));
+    return centres[slice];
   }
 
   /** Geometric centres of all slices, Hz, shape [28 · perBand]. */
   public double[] centres() {
-    double[] centres = new double[count()];
-    for (int i = 0; i < centres.length; i++) {
-      centres[i] = centre(i);
-    }
-    return centres;
+    return centres.clone();
   }
 
   /** Width of a slice, Hz. */
   public double width(int slice) {
     return upper(slice) - lower(slice);
-  }
-
-  private double edge(int band, int step) {
-    if (step == perBand) {
-      // the next slice's lower edge, to the bit
-      return band + 1 < Bands.COUNT ? Bands.lower(band + 1) : Bands.upper(band);
-    }
-    double lower = Bands.lower(band);
-    return lower * Math.pow(Bands.upper(band) / lower, step / (double) perBand);
   }
 }

@@ -33,6 +33,13 @@ class BandSlicesTest {
   }
 
   @Test
+  void theCentresHandedOutAreACopy() {
+    BandSlices slices = new BandSlices(6);
+    slices.centres()[0] = 1.0;
+    assertThat(slices.centre(0)).isGreaterThan(20.0).isEqualTo(slices.centres()[0]);
+  }
+
+  @Test
   void higherOrdersNeedFinerSlices() {
     assertThat(BandSlices.forOrder(1).perBand()).isEqualTo(6);
     assertThat(BandSlices.forOrder(2).perBand()).isEqualTo(12);
