@@ -21,7 +21,7 @@ final class SettingsCodec {
 
   static Settings read(JsonObject object) {
     return new Settings(
-        object.text(CONSTRUCTION),
+        id(object, CONSTRUCTION),
         object.number(LENGTH),
         object.number(WIDTH),
         object.byCondition(LOCAL_SPEED, EdgeSpeedCodec.SPEED),
@@ -30,14 +30,27 @@ final class SettingsCodec {
         object.byCondition(CROSS_SPECTRUM, CrossSpectrumCodec.CROSS_SPECTRUM),
         object.byCondition(CONVECTION_RATIO, NumberCodec.NUMBER),
         object.byCondition(LOSS_FACTOR, BandsCodec.BANDS),
-        object.text(LAY_UP),
-        object.text(ZONE),
-        object.text(SUPPLIER));
+        id(object, LAY_UP),
+        id(object, ZONE),
+        id(object, SUPPLIER));
+  }
+
+  /**
+   * The id of a key; null if it is absent. One that cannot be read is empty and leads nowhere, so
+   * that the value of a section above does not silently take its place.
+   */
+  private static String id(JsonObject object, String key) {
+    JsonValue value = object.value(key);
+    String id = value.text();
+    if (id != null && id.isBlank()) {
+      value.keep();
+    }
+    return value.unread() ? "" : id;
   }
 
   static void write(JsonBuilder builder, Settings settings) {
     builder
-        .text(CONSTRUCTION, settings.construction())
+        .name(CONSTRUCTION, settings.construction())
         .number(LENGTH, settings.length())
         .number(WIDTH, settings.width())
         .byCondition(LOCAL_SPEED, settings.localSpeed(), EdgeSpeedCodec.SPEED)
@@ -46,8 +59,8 @@ final class SettingsCodec {
         .byCondition(CROSS_SPECTRUM, settings.crossSpectrum(), CrossSpectrumCodec.CROSS_SPECTRUM)
         .byCondition(CONVECTION_RATIO, settings.convectionRatio(), NumberCodec.NUMBER)
         .byCondition(LOSS_FACTOR, settings.lossFactor(), BandsCodec.BANDS)
-        .text(LAY_UP, settings.layUp())
-        .text(ZONE, settings.zone())
-        .text(SUPPLIER, settings.supplier());
+        .name(LAY_UP, settings.layUp())
+        .name(ZONE, settings.zone())
+        .name(SUPPLIER, settings.supplier());
   }
 }

@@ -3,6 +3,10 @@ package eddyledger.file;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import com.fasterxml.jackson.databind.JsonNode;
+import eddyledger.ledger.Ledger;
+import eddyledger.ledger.LedgerRow;
+import eddyledger.ledger.Status;
+import eddyledger.ledger.Way;
 import eddyledger.model.BandTable;
 import eddyledger.model.ByCondition;
 import eddyledger.model.JudgedBands;
@@ -14,6 +18,7 @@ import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
+import org.junit.jupiter.params.provider.ValueSource;
 
 /** What cannot be read is written back as it stood, beside what can. */
 class UnreadValueTest {
@@ -34,6 +39,10 @@ class UnreadValueTest {
         "vehicle.convection_ratio | {`best`:0.7,`by_condition`:`none`}",
         "zones[1].absorption_area_m2 | {`by_condition`:{`cruise`:`4 m2`}}",
         "tree[0].children[0].local_speed | {`by_condition`:{`cruise`:1.2}}",
+        "tree[0].children[0].construction | 7",
+        "tree[0].children[0].lay_up | [`none`]",
+        "tree[0].children[0].zone | {}",
+        "tree[0].children[0].zone | ``",
         "tree[0].children[0].count | `two`",
         "tree[0].children[0].count | 2.5",
         "targets[0].receivers | [`driver`,7]",
@@ -53,6 +62,17 @@ class UnreadValueTest {
     Vehicle again = new ProjectReader().read(saved, "saved").vehicle().orElseThrow();
     assertThat(again).isEqualTo(vehicle);
     assertThat(ProjectWriter.toText(again)).isEqualTo(saved);
+  }
+
+  @ParameterizedTest
+  @ValueSource(strings = {"construction", "lay_up", "zone"})
+  void theValueOfASectionDoesNotTakeItsPlace(String key) {
+    SmallFile file = new SmallFile().with("tree[0].children[0]." + key, "7");
+    assertThat(file.onlyFinding().code()).isEqualTo("wrong-type");
+    Ledger ledger = Ledger.of(file.vehicle());
+    LedgerRow window = ledger.sheets().get(0).row("window", Way.ALL).orElseThrow();
+    assertThat(window.status()).isEqualTo(Status.FAILED);
+    assertThat(window.reason()).startsWith("tree[0].children[0]." + key + " (window): ");
   }
 
   @Test
