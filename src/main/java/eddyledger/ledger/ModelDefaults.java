@@ -25,7 +25,7 @@ public final class ModelDefaults {
 
   /** Id of the wall-pressure spectrum where none is chosen. */
   public static String spectrum() {
-    return PanelResolver.SPECTRUM;
+    return FlowLookup.SPECTRUM;
   }
 
   /** Convection speed over local flow speed where none is set. */
