@@ -141,8 +141,10 @@ final class TileWriter {
           .ifPresent(tips::add);
     }
     tips.addAll(others.tips());
+    List<LedgerRow> contributions = LedgerTree.contributions(sheet.rows());
     if (!missing.isEmpty()) {
-      tips.add(missing + ": " + sheet.total().reason());
+      tips.add(missing);
+      tips.addAll(Missing.tips(contributions));
     }
     tips.addAll(range.tips());
     return tips;

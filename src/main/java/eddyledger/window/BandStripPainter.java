@@ -78,6 +78,8 @@ final class BandStripPainter {
         g.fill(bar);
       }
       case HATCHED -> {
+        g.setColor(palette.grid());
+        g.fill(bar);
         g.setPaint((peak ? peakHatch : hatch).on(g));
         g.fill(bar);
         g.setColor(ink);

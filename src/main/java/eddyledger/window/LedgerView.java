@@ -69,12 +69,7 @@ public final class LedgerView extends JPanel {
   public void updateUI() {
     super.updateUI();
     if (scroll != null) {
-      // the look puts its own border on when it changes
-      SwingUtilities.invokeLater(
-          () -> {
-            scroll.setBorder(BorderFactory.createEmptyBorder());
-            refresh();
-          });
+      SwingUtilities.invokeLater(this::refresh);
     }
   }
 

@@ -12,6 +12,7 @@ import java.awt.Graphics2D;
 import java.awt.Rectangle;
 import java.util.ArrayList;
 import java.util.List;
+import javax.swing.BorderFactory;
 import javax.swing.JLabel;
 import javax.swing.JPanel;
 import javax.swing.JScrollPane;
@@ -38,14 +39,16 @@ public final class TargetStripView extends JPanel {
     Theme.named(this, "target-strip", "Targets");
     setPreferredSize(new Dimension(1, TileRow.HEIGHT));
     setMinimumSize(new Dimension(1, TileRow.HEIGHT));
-    scroll.setBorder(null);
+    scroll.setBorder(BorderFactory.createEmptyBorder());
     scroll.setOpaque(false);
     scroll.getViewport().setOpaque(false);
     scroll.setHorizontalScrollBarPolicy(ScrollPaneConstants.HORIZONTAL_SCROLLBAR_NEVER);
     scroll.setVerticalScrollBarPolicy(ScrollPaneConstants.VERTICAL_SCROLLBAR_NEVER);
+    scroll.setWheelScrollingEnabled(false);
     scroll.addMouseWheelListener(event -> wheel(event.getWheelRotation()));
     scroll.getViewport().addChangeListener(event -> repaint());
     add(scroll);
+    message.setBorder(BorderFactory.createEmptyBorder(16, 16, 0, 16));
     add(message, BorderLayout.NORTH);
     row.setFocusTraversalPolicyProvider(true);
     row.setFocusTraversalPolicy(new OnlyTheChosen());
@@ -63,7 +66,6 @@ public final class TargetStripView extends JPanel {
     List<TargetTile> wanted = presenter.tiles();
     message.setText(presenter.message());
     message.setVisible(!presenter.message().isEmpty());
-    message.setBorder(javax.swing.BorderFactory.createEmptyBorder(16, 16, 0, 16));
     if (same(wanted)) {
       for (int i = 0; i < wanted.size(); i++) {
         tiles.get(i).show(wanted.get(i));
