@@ -38,7 +38,7 @@ final class CabinStages {
             + source.where().ofFixed(Settings::zone)
             + "; absorption entered"
             + graded(into.absorptionArea()),
-        "p^{2} = 4 ρ c W/A, balanced with the zones behind open apertures"
+        "p^{2} = 4 ρ c W/A, balanced over coupled zones"
             + (sight.isEmpty() ? "" : ", and direct part"),
         "A = "
             + Readable.level(source.value("A"))

@@ -12,8 +12,11 @@ import eddyledger.model.TabulatedLayUp;
 import eddyledger.present.StageSteps.Stage;
 import eddyledger.present.TraceNote.Kind;
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
+import java.util.stream.Collectors;
 
 /** Writes the stages of the path: the panel's response and radiation, the lay-up. */
 final class PathStages {
@@ -76,20 +79,29 @@ final class PathStages {
   }
 
   private String origins() {
-    String size = source.where().ofFixed(Settings::length);
-    String width = source.where().ofFixed(Settings::width);
-    String sizes = size.equals(width) ? size : size + " and " + width;
-    String loss =
+    Map<String, List<String>> names = new LinkedHashMap<>();
+    origin(names, "construction", source.where().ofFixed(Settings::construction));
+    origin(names, "size", source.where().ofFixed(Settings::length));
+    if (!source.where().ofFixed(Settings::width).equals(source.where().ofFixed(Settings::length))) {
+      origin(names, "width", source.where().ofFixed(Settings::width));
+    }
+    origin(
+        names,
+        "loss factor",
         source.where().ofVarying(Settings::lossFactor)
             + source
                 .where()
                 .varying(Settings::lossFactor)
                 .map(it -> graded(it.evidence()))
-                .orElse("");
-    String construction = "Construction " + source.where().ofFixed(Settings::construction);
-    return loss.equals(sizes)
-        ? construction + "; size and loss factor " + loss
-        : construction + "; size " + sizes + "; loss factor " + loss;
+                .orElse(""));
+    return Readable.capital(
+        names.entrySet().stream()
+            .map(entry -> String.join(" and ", entry.getValue()) + " " + entry.getKey())
+            .collect(Collectors.joining("; ")));
+  }
+
+  private static void origin(Map<String, List<String>> names, String name, String where) {
+    names.computeIfAbsent(where, it -> new ArrayList<>()).add(name);
   }
 
   private StageText measured(StagePicture picture, String change) {

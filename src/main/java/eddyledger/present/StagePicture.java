@@ -92,7 +92,7 @@ public record StagePicture(
     boolean whole = Math.max(Math.abs(least), Math.abs(most)) >= WHOLE;
     String low = whole ? whole(least) : Readable.level(least);
     String high = whole ? whole(most) : Readable.level(most);
-    return low.equals(high) ? low + " " + unit + " in all bands" : low + " to " + high + " " + unit;
+    return low.equals(high) ? low + " " + unit + ", all bands" : low + " to " + high + " " + unit;
   }
 
   private static String whole(double value) {

@@ -18,6 +18,7 @@ final class StagePainter {
   private static final double CAPTION = 16.0;
   private static final double GAP = 1.4;
   private static final double LEAST_CELL = 30.0;
+  private static final double MOST_CELL = 72.0;
   private static final BasicStroke THIN = new BasicStroke(1f);
   private static final BasicStroke CURVE =
       new BasicStroke(1.6f, BasicStroke.CAP_ROUND, BasicStroke.JOIN_ROUND);
@@ -89,7 +90,7 @@ final class StagePainter {
 
   private void bars() {
     double[] values = picture.rows().get(0);
-    double cell = plot.getWidth() / Math.max(1, values.length);
+    double cell = Math.min(MOST_CELL, plot.getWidth() / Math.max(1, values.length));
     boolean named = cell >= LEAST_CELL;
     g.setFont(small);
     for (int i = 0; i < values.length; i++) {
@@ -110,6 +111,12 @@ final class StagePainter {
     if (!named) {
       foot();
     }
+    // the vehicle's own speed, to see by which the flow is faster or slower
+    double one = y(1.0);
+    g.setStroke(DASHED);
+    g.setColor(palette.ink3());
+    g.draw(new Line2D.Double(plot.getX(), one, plot.getX() + cell * values.length - 2, one));
+    g.setStroke(THIN);
   }
 
   private void centred(String text, double x, double baseline) {

@@ -2,6 +2,7 @@ package eddyledger.window;
 
 import eddyledger.present.TraceAccount;
 import eddyledger.present.TraceStage;
+import eddyledger.quantity.Bands;
 import java.awt.Dimension;
 import java.awt.Graphics;
 import java.awt.Rectangle;
@@ -15,20 +16,27 @@ import javax.swing.KeyStroke;
 import javax.swing.Scrollable;
 import javax.swing.SwingConstants;
 
-/** The rows of a trace, one below the other; up and down go from row to row. */
+/**
+ * The rows of a trace, one below the other. Up and down go from row to row, left and right to the
+ * band below and above.
+ */
 final class TracePage extends Painted implements Scrollable {
   private static final int LINE = 24;
 
   private final transient List<TraceRow> rows = new ArrayList<>();
+  private transient TraceAccount account;
+  private transient IntConsumer follow = band -> {};
 
   TracePage() {
     super(AccessibleRole.LIST);
     Theme.named(this, "trace.stages", "Steps of the trace");
-    move("UP", -1);
-    move("DOWN", 1);
+    key("UP", () -> row(-1));
+    key("DOWN", () -> row(1));
+    key("LEFT", () -> band(-1));
+    key("RIGHT", () -> band(1));
   }
 
-  private void move(String key, int by) {
+  private void key(String key, Runnable action) {
     getInputMap(WHEN_ANCESTOR_OF_FOCUSED_COMPONENT).put(KeyStroke.getKeyStroke(key), key);
     getActionMap()
         .put(
@@ -36,13 +44,23 @@ final class TracePage extends Painted implements Scrollable {
             new AbstractAction() {
               @Override
               public void actionPerformed(ActionEvent event) {
-                int now = focused();
-                int next = Math.max(0, Math.min(rows.size() - 1, now + by));
-                if (!rows.isEmpty()) {
-                  rows.get(next).requestFocusInWindow();
-                }
+                action.run();
               }
             });
+  }
+
+  private void row(int by) {
+    int next = Math.max(0, Math.min(rows.size() - 1, focused() + by));
+    if (!rows.isEmpty()) {
+      rows.get(next).requestFocusInWindow();
+    }
+  }
+
+  private void band(int by) {
+    int band = account.band() + by;
+    if (band >= 0 && band < Bands.COUNT) {
+      follow.accept(band);
+    }
   }
 
   private int focused() {
@@ -55,20 +73,24 @@ final class TracePage extends Painted implements Scrollable {
   }
 
   /** Shows the stages of an account; the row with the focus keeps it. */
-  void show(TraceAccount account, IntConsumer follow) {
-    int focused = focused();
-    rows.clear();
-    removeAll();
-    for (TraceStage stage : account.stages()) {
-      TraceRow row = new TraceRow(account, stage, follow);
-      rows.add(row);
-      add(row);
+  void show(TraceAccount shown, IntConsumer listener) {
+    account = shown;
+    follow = listener;
+    List<TraceStage> stages = shown.stages();
+    while (rows.size() > stages.size()) {
+      remove(rows.remove(rows.size() - 1));
+    }
+    for (int i = 0; i < stages.size(); i++) {
+      if (i < rows.size()) {
+        rows.get(i).show(shown, stages.get(i));
+      } else {
+        TraceRow row = new TraceRow(shown, stages.get(i), band -> follow.accept(band));
+        rows.add(row);
+        add(row);
+      }
     }
     revalidate();
     repaint();
-    if (focused >= 0 && focused < rows.size()) {
-      rows.get(focused).requestFocusInWindow();
-    }
   }
 
   @Override

@@ -26,8 +26,8 @@ final class TraceRow extends Painted {
   private static final double BAR = 9.0;
   private static final double TICK = 12.0;
 
-  private final transient TraceStage stage;
-  private final transient TraceAccount account;
+  private transient TraceStage stage;
+  private transient TraceAccount account;
   private final transient IntConsumer follow;
 
   /**
@@ -39,15 +39,21 @@ final class TraceRow extends Painted {
    */
   TraceRow(TraceAccount account, TraceStage stage, IntConsumer follow) {
     super(AccessibleRole.LABEL);
-    this.account = account;
-    this.stage = stage;
     this.follow = follow;
     setFocusable(true);
     setToolTipText("");
+    show(account, stage);
+    listen();
+  }
+
+  /** Shows another stage; the focus stays where it is. */
+  void show(TraceAccount other, TraceStage shown) {
+    account = other;
+    stage = shown;
     Theme.named(
         this, "trace.stage." + stage.number(), "Step " + stage.number() + ", " + stage.name());
     getAccessibleContext().setAccessibleDescription(String.join(". ", stage.lines()));
-    listen();
+    repaint();
   }
 
   private void listen() {

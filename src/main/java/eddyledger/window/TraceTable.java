@@ -27,6 +27,7 @@ final class TraceTable extends JTable {
     numbers = (TraceNumbers) getModel();
     Theme.named(this, "trace.numbers", "All numbers of the trace");
     setDefaultRenderer(Object.class, new Cell());
+    setFillsViewportHeight(true);
     getTableHeader().setReorderingAllowed(false);
     getTableHeader().setDefaultRenderer(new Head());
     for (TraceNumbers.Column column : TraceNumbers.Column.values()) {
@@ -47,7 +48,7 @@ final class TraceTable extends JTable {
   JScrollPane scrolled() {
     JScrollPane scroll = new JScrollPane(this);
     scroll.setBorder(javax.swing.BorderFactory.createEmptyBorder(0, 16, 0, 0));
-    scroll.getViewport().setBackground(Theme.palette().paper());
+    scroll.setOpaque(false);
     return scroll;
   }
 

@@ -97,6 +97,7 @@ public final class TraceView extends JPanel {
     steps.setSelected(true);
     steps.addActionListener(event -> card());
     all.addActionListener(event -> card());
+    bands.setToolTipText("Left and right in the steps, or a click on a bar, choose it as well");
     bands.setMaximumRowCount(bands.getItemCount());
     bands.addActionListener(event -> choose());
     top.add(title, "growx, wmin 0");

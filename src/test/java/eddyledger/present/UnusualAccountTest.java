@@ -99,6 +99,18 @@ class UnusualAccountTest {
   }
 
   @Test
+  void valuesFromOnePlaceAreToldTogether() {
+    String same =
+        changed(
+            "\"length_m\": 0.9, \"width_m\": 0.5,",
+            "\"length_m\": 0.9, \"width_m\": 0.5, \"construction\": \"glass\",");
+    assertThat(stage(account(same, "window"), 6).origin())
+        .isEqualTo("Construction and size set here; loss factor from the vehicle");
+    assertThat(stage(account(SMALL, "window"), 6).origin())
+        .isEqualTo("Construction from side; size set here; loss factor from the vehicle");
+  }
+
+  @Test
   void withoutLayUpNothingIsTakenOff() {
     TraceStage layUp = stage(account(SMALL, "window"), 7);
     assertThat(layUp.sentence()).isEqualTo("None: the panel radiates straight into the zone.");

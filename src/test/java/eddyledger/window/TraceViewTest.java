@@ -89,6 +89,15 @@ class TraceViewTest {
           assertThat(asked).isEmpty();
           ((JComboBox<?>) find(view, "trace.band")).setSelectedIndex(10);
           assertThat(asked).containsExactly(10);
+          TracePage page = (TracePage) find(view, "trace.stages");
+          Component row = find(view, "trace.stage.4");
+          page.getActionMap().get("RIGHT").actionPerformed(new ActionEvent(page, 0, ""));
+          page.getActionMap().get("LEFT").actionPerformed(new ActionEvent(page, 0, ""));
+          assertThat(asked).containsExactly(10, 11, 10);
+          assertThat(find(view, "trace.stage.4")).isSameAs(row);
+          view.show(account(27));
+          page.getActionMap().get("RIGHT").actionPerformed(new ActionEvent(page, 0, ""));
+          assertThat(asked).hasSize(3);
         });
   }
 
