@@ -3,9 +3,7 @@ package eddyledger.window;
 import eddyledger.present.SheetPresenter;
 import java.awt.BorderLayout;
 import java.awt.Dimension;
-import java.awt.KeyboardFocusManager;
 import java.awt.Rectangle;
-import java.beans.PropertyChangeListener;
 import javax.swing.BorderFactory;
 import javax.swing.JButton;
 import javax.swing.JComponent;
@@ -22,7 +20,6 @@ public final class SheetView extends JPanel {
   private final SheetPresenter presenter;
   private final JButton trace = new LinkButton(null, "How this level comes about");
   private final SheetForm form;
-  private final PropertyChangeListener follow = event -> followFocus(event.getNewValue());
   private String row = "";
 
   /**
@@ -76,29 +73,8 @@ public final class SheetView extends JPanel {
     }
   }
 
-  @Override
-  public void addNotify() {
-    super.addNotify();
-    focusManager().addPropertyChangeListener("focusOwner", follow);
-  }
-
-  @Override
-  public void removeNotify() {
-    focusManager().removePropertyChangeListener("focusOwner", follow);
-    super.removeNotify();
-  }
-
-  private static KeyboardFocusManager focusManager() {
-    return KeyboardFocusManager.getCurrentKeyboardFocusManager();
-  }
-
-  private void followFocus(Object owner) {
-    if (owner instanceof JComponent component && SwingUtilities.isDescendingFrom(component, form)) {
-      reveal(component);
-    }
-  }
-
-  private static void reveal(JComponent component) {
+  /** Scrolls a field into sight, with a line above and below. */
+  static void reveal(JComponent component) {
     component.scrollRectToVisible(
         new Rectangle(
             0, -LINES_AROUND, component.getWidth(), component.getHeight() + 2 * LINES_AROUND));
