@@ -2,17 +2,22 @@ package eddyledger.present;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import eddyledger.app.Edit;
 import eddyledger.model.Allowance;
 import eddyledger.model.BandTable;
 import eddyledger.model.Evidence;
 import eddyledger.model.Extras;
 import eddyledger.model.JudgedBands;
+import eddyledger.model.MeasuredPanel;
 import eddyledger.model.OtherSource;
+import eddyledger.model.Panel;
 import eddyledger.model.PassRule;
 import eddyledger.model.Rating;
 import eddyledger.model.Settings;
 import eddyledger.model.Target;
+import eddyledger.model.TreeEdit;
 import eddyledger.model.Vehicle;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
@@ -225,13 +230,62 @@ class SheetRowsTest {
   }
 
   @Test
+  void aMeasuredPanelSaysWhatDoesNotCount() {
+    Vehicle vehicle =
+        TreeEdit.change(
+            ExampleDesk.example(),
+            "crown-a",
+            node -> {
+              Panel panel = (Panel) node;
+              MeasuredPanel measured =
+                  new MeasuredPanel(JudgedBands.of(BandTable.single(30.0)), null, Extras.NONE);
+              return new Panel(
+                  panel.id(),
+                  panel.name(),
+                  panel.count(),
+                  panel.settings(),
+                  measured,
+                  panel.evidence(),
+                  panel.extras());
+            });
+    SheetText text = new ExampleDesk(vehicle).row("crown-a").sheet.text();
+    assertThat(text.groups().get(0).note())
+        .isEqualTo(
+            "A measured level difference stands for build and lay-up;"
+                + " they do not change the level.");
+    assertThat(desk.row("crown-a").sheet.text().groups().get(0).note()).isEmpty();
+  }
+
+  @Test
+  void aVehicleThatCannotBeComputedSaysSo() {
+    desk.row("crown-a").computed();
+    desk.state.apply(Edit.of("conditions", "", it -> it.edit().receivers(List.of()).build()));
+    desk.computed();
+    assertThat(desk.field("level").origin()).isEqualTo("not computed");
+    assertThat(desk.field("level").weight()).isEqualTo(SheetField.Weight.FAINT);
+  }
+
+  @Test
+  void anAllowanceGivenTwiceIsTakenAwayWhole() {
+    List<Allowance> twice = new ArrayList<>(ExampleDesk.example().allowances());
+    twice.add(new Allowance("station-a", "row-2", "cruise", 60.0, Evidence.NONE, Extras.NONE));
+    ExampleDesk other =
+        new ExampleDesk(ExampleDesk.example().edit().allowances(twice).build()).row("station-a");
+    assertThat(other.field("allowance").text()).isEqualTo("71.5");
+    other.sheet.back("allowance");
+    assertThat(other.field("allowance").text()).isEmpty();
+    assertThat(other.state.vehicle().allowances()).hasSize(twice.size() - 2);
+  }
+
+  @Test
   void aMissingLevelIsADashAndSaysWhy() {
     Vehicle vehicle =
-        eddyledger.model.TreeEdit.settings(
+        TreeEdit.settings(
             ExampleDesk.example(), "station-a", it -> it.edit().localSpeed(null).build());
     ExampleDesk other = new ExampleDesk(vehicle).row("crown-a").computed();
     assertThat(other.field("level").text()).isEqualTo("—");
-    assertThat(other.field("level").message().text()).contains("has no local flow speed");
+    assertThat(other.field("level").message().text())
+        .isEqualTo("The panel has no local flow speed in condition \"cruise\".");
     assertThat(other.field("localSpeed").message().text())
         .isEqualTo(
             "The panel has no local flow speed in condition \"cruise\"."
