@@ -137,7 +137,7 @@ final class FlowEntries {
     return field
         .text(text.isEmpty() ? "—" : text)
         .unit(unit, Quantity.SPEED)
-        .origin(context.stale() ? context.pending() : "worked out", false)
+        .origin(context.stale() ? context.pending() : text.isEmpty() ? "" : "worked out", false)
         .weight(Weight.FAINT);
   }
 }

@@ -47,8 +47,7 @@ final class SheetForm extends JPanel implements Scrollable {
   SheetForm(SheetPresenter presenter, JComponent traceButton) {
     super(
         new MigLayout(
-            "insets 10 16 12 12, gap 0, wrap 1, fillx, hidemode 3, novisualpadding",
-            "[grow,fill]"));
+            "insets 10 16 12 4, gap 0, wrap 1, fillx, hidemode 3, novisualpadding", "[grow,fill]"));
     this.presenter = presenter;
     this.traceButton = traceButton;
   }

@@ -48,7 +48,7 @@ final class SheetRowView extends JPanel {
     layout =
         new MigLayout(
             "insets 0, gap 0, hidemode 3, novisualpadding",
-            "[98!][78!]6[34!]4[grow,fill]",
+            "[98!][78!]6[34!]3[grow,fill]",
             "[22::,center][]0[]");
     setLayout(layout);
     setOpaque(false);

@@ -33,9 +33,10 @@ public final class SheetView extends JPanel {
     trace.addActionListener(event -> showTrace.run());
     Theme.named(trace, "sheet.trace", trace.getText());
     form = new SheetForm(presenter, trace);
+    // the bar keeps its room, so that lines do not shift when it comes; its track is not seen
     JScrollPane scroll =
         new JScrollPane(
-            form, JScrollPane.VERTICAL_SCROLLBAR_AS_NEEDED, JScrollPane.HORIZONTAL_SCROLLBAR_NEVER);
+            form, JScrollPane.VERTICAL_SCROLLBAR_ALWAYS, JScrollPane.HORIZONTAL_SCROLLBAR_NEVER);
     scroll.setBorder(BorderFactory.createEmptyBorder());
     scroll.getVerticalScrollBar().setUnitIncrement(22);
     add(scroll);

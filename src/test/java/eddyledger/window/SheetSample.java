@@ -52,7 +52,7 @@ public final class SheetSample {
       sample.draw("own-" + palette, 1120, SheetSample::own);
       sample.draw("bands-" + palette, 760, SheetSample::bands);
       sample.draw("faults-" + palette, 900, SheetSample::faults);
-      sample.draw("section-" + palette, 760, it -> it.select("station-a"));
+      sample.draw("section-" + palette, 560, it -> it.select("station-a"));
       sample.draw("vehicle-" + palette, 1080, it -> it.select("quillon-82"));
       sample.draw("source-" + palette, 760, it -> it.select("propulsion-row-2-cruise"));
     }
