@@ -20,9 +20,15 @@ public final class BudgetEdit {
   public static Optional<Allowance> allowance(
       Vehicle vehicle, String node, String receiver, String condition) {
     return vehicle.allowances().stream()
-        .filter(it -> node.equals(it.node()))
-        .filter(it -> receiver.equals(it.receiver()) && condition.equals(it.condition()))
+        .filter(it -> isFor(it, node, receiver, condition))
         .findFirst();
+  }
+
+  private static boolean isFor(
+      Allowance allowance, String node, String receiver, String condition) {
+    return node.equals(allowance.node())
+        && receiver.equals(allowance.receiver())
+        && condition.equals(allowance.condition());
   }
 
   /** The vehicle with an allowance added or its level changed, dB(A). */
@@ -41,10 +47,11 @@ public final class BudgetEdit {
     return vehicle.edit().allowances(all).build();
   }
 
-  /** The vehicle without an allowance. */
+  /** The vehicle without an allowance, even if it was given twice. */
   public static Vehicle disallow(Vehicle vehicle, String node, String receiver, String condition) {
     List<Allowance> rest = new ArrayList<>(vehicle.allowances());
-    allowance(vehicle, node, receiver, condition).ifPresent(rest::remove);
+    // given twice by mistake, the second would hold once the first is gone
+    rest.removeIf(it -> isFor(it, node, receiver, condition));
     return vehicle.edit().allowances(rest).build();
   }
 

@@ -21,18 +21,15 @@ final class CopyName {
 
   /** An id of a copy that the vehicle does not use yet: construction, hyphen, panel. */
   static String id(Vehicle vehicle, String construction, String panel) {
-    Set<String> taken = ids(vehicle);
-    String plain = plain(construction, panel);
-    String id = plain;
-    for (int i = 2; taken.contains(id.toLowerCase(Locale.ROOT)); i++) {
-      id = plain + "-" + i;
-    }
-    return id;
+    return free(vehicle, plain(construction, panel));
   }
 
   private static String plain(String construction, String panel) {
-    String whole = construction + "-" + panel;
-    return whole.substring(0, Math.min(whole.length(), LONGEST_ID - ROOM_FOR_NUMBER));
+    return shortened(construction + "-" + panel);
+  }
+
+  private static String shortened(String id) {
+    return id.substring(0, Math.min(id.length(), LONGEST_ID - ROOM_FOR_NUMBER));
   }
 
   /** Whether an id is that of a copy of a construction for a panel. */
@@ -64,7 +61,7 @@ final class CopyName {
   /** An id that starts so and that the vehicle does not use yet. */
   static String free(Vehicle vehicle, String wanted) {
     Set<String> taken = ids(vehicle);
-    String plain = wanted.substring(0, Math.min(wanted.length(), LONGEST_ID - ROOM_FOR_NUMBER));
+    String plain = shortened(wanted);
     String id = plain;
     for (int i = 2; taken.contains(id.toLowerCase(Locale.ROOT)); i++) {
       id = plain + "-" + i;

@@ -19,6 +19,9 @@ import java.util.stream.Stream;
 final class BudgetEntries {
   private static final String NONE = "—";
 
+  /** Where in the file: of use in a list of findings, not beside the field itself. */
+  private static final String PLACE = "[\\w.\\[\\]-]+ \\([^)]*\\): ";
+
   private final SheetContext context;
   private final String receiver;
   private final String condition;
@@ -73,12 +76,17 @@ final class BudgetEntries {
     boolean partial = row.map(it -> it.status() == Status.PARTIAL).orElse(false);
     String text = row.isEmpty() || Double.isNaN(level) ? NONE : LevelWords.level(level);
     row.filter(it -> it.status() != Status.OK && !it.reason().isEmpty())
-        .ifPresent(it -> field.message(SheetMessage.warning(Words.sentence(it.reason()) + ".")));
+        .ifPresent(it -> field.message(SheetMessage.warning(reason(it.reason()))));
     return field
         .text(partial && !text.equals(NONE) ? "≥ " + text : text)
         .unit(Unit.DECIBEL_A, Quantity.LEVEL)
-        .origin(context.stale() ? "computing" : "", false)
+        .origin(context.pending(), false)
         .weight(context.stale() ? Weight.FAINT : Weight.RESULT);
+  }
+
+  private static String reason(String reason) {
+    String words = Words.sentence(reason.replaceAll(PLACE, ""));
+    return words.endsWith(".") ? words : words + ".";
   }
 
   private Entry margin() {
@@ -96,7 +104,7 @@ final class BudgetEntries {
         .text(Double.isNaN(margin) || !(whole || over) ? NONE : LevelWords.margin(margin))
         .unit(Unit.DECIBEL, Quantity.LEVEL)
         .origin(state, false)
-        .tip(context.stale() ? "Of the last result; the new one is being computed." : "")
+        .tip(context.stale() ? "Of the last result, before the last change." : "")
         .state(row.map(it -> it.judgement().state()).orElse(null))
         .weight(context.stale() ? Weight.FAINT : Weight.RESULT);
   }

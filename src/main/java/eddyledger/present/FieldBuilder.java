@@ -11,6 +11,7 @@ import java.util.List;
 final class FieldBuilder {
   private final String key;
   private final String label;
+  private final String spoken;
   private final Kind kind;
   private String text = "";
   private String chosen = "";
@@ -28,18 +29,19 @@ final class FieldBuilder {
   private Weight weight = Weight.PLAIN;
 
   FieldBuilder(Entry entry, Kind kind) {
-    this(entry.key(), entry.label(), kind);
+    this(entry.key(), entry.label(), Words.sentence(entry.what()), kind);
   }
 
-  private FieldBuilder(String key, String label, Kind kind) {
+  private FieldBuilder(String key, String label, String spoken, Kind kind) {
     this.key = key;
     this.label = label;
+    this.spoken = spoken;
     this.kind = kind;
   }
 
   /** A changeable copy. */
   static FieldBuilder of(SheetField field) {
-    FieldBuilder copy = new FieldBuilder(field.key(), field.label(), field.kind());
+    FieldBuilder copy = new FieldBuilder(field.key(), field.label(), field.spoken(), field.kind());
     copy.text = field.text();
     copy.chosen = field.chosen();
     copy.options = field.options();
@@ -119,7 +121,6 @@ final class FieldBuilder {
   }
 
   SheetField build() {
-    String spoken = unit.isEmpty() ? label : label + ", " + unit;
     return new SheetField(
         key, label, spoken, kind, text, chosen, options, unit, units, origin, own, back, message,
         tip, link, only, state, weight);

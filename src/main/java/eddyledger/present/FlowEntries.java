@@ -12,7 +12,6 @@ import eddyledger.present.SheetField.Weight;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
-import java.util.Locale;
 import java.util.function.BiFunction;
 import java.util.function.Function;
 
@@ -41,27 +40,33 @@ final class FlowEntries {
     List<Entry> layer =
         List.of(
             part(
-                new Part("layerThickness", "Layer thickness", "thickness_m"),
+                new Part(
+                    "layerThickness", "Layer thickness", "boundary-layer thickness", "thickness_m"),
                 number(Quantity.LAYER, Limit.LAYER_THICKNESS, "delta"),
                 LayerGiven::thickness,
                 (it, value) -> with(it, 1, value)),
             part(
-                new Part("runningLength", "Running length", "running_length_m"),
+                new Part("runningLength", "Running length", "running length", "running_length_m"),
                 number(Quantity.RUNNING_LENGTH, Limit.RUNNING_LENGTH, ""),
                 LayerGiven::runningLength,
                 (it, value) -> with(it, 0, value)),
             part(
-                new Part("displacementThickness", "Displacement", "displacement_thickness_m"),
+                new Part(
+                    "displacementThickness",
+                    "Displacement",
+                    "displacement thickness",
+                    "displacement_thickness_m"),
                 number(Quantity.LAYER, Limit.LAYER_THICKNESS, "delta*"),
                 LayerGiven::displacementThickness,
                 (it, value) -> with(it, 2, value)),
             part(
-                new Part("momentumThickness", "Momentum", "momentum_thickness_m"),
+                new Part(
+                    "momentumThickness", "Momentum", "momentum thickness", "momentum_thickness_m"),
                 number(Quantity.LAYER, Limit.LAYER_THICKNESS, "theta"),
                 LayerGiven::momentumThickness,
                 (it, value) -> with(it, 3, value)),
             part(
-                new Part("wallShear", "Wall shear", "wall_shear_stress_Pa"),
+                new Part("wallShear", "Wall shear", "wall shear stress", "wall_shear_stress_Pa"),
                 number(Quantity.SHEAR, Limit.WALL_SHEAR, "tau_w"),
                 LayerGiven::wallShear,
                 (it, value) -> with(it, 4, value)));
@@ -75,7 +80,7 @@ final class FlowEntries {
   }
 
   /** Names of a part of the layer. */
-  private record Part(String key, String label, String place) {}
+  private record Part(String key, String label, String what, String place) {}
 
   private static JudgedNumber number(Quantity quantity, Limit limit, String symbol) {
     return new JudgedNumber(
@@ -99,7 +104,7 @@ final class FlowEntries {
     return new NumberEntry<>(
         part.key(),
         part.label(),
-        part.label().toLowerCase(Locale.ROOT),
+        part.what(),
         new PartSlot<>(whole, get, put, BLANK, FlowEntries::essence),
         "boundary_layer." + part.place(),
         number);
@@ -132,7 +137,7 @@ final class FlowEntries {
     return field
         .text(text.isEmpty() ? "—" : text)
         .unit(unit, Quantity.SPEED)
-        .origin(context.stale() ? "computing" : "worked out", false)
+        .origin(context.stale() ? context.pending() : text.isEmpty() ? "" : "worked out", false)
         .weight(Weight.FAINT);
   }
 }

@@ -42,7 +42,7 @@ final class NumberEntry<T> extends SlotEntry<T> {
       return field.build();
     }
     NumberIn.Fallback fallback = number.fallback(context);
-    String words = context.stale() && fallback.computed() ? "computing" : fallback.origin();
+    String words = context.stale() && fallback.computed() ? context.pending() : fallback.origin();
     return field
         .text(NumberText.text(fallback.value(), number.quantity(), unit, fallback.digits()))
         .origin(Double.isNaN(fallback.value()) ? "not given" : words, false)

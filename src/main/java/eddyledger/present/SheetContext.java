@@ -20,7 +20,7 @@ import java.util.Optional;
  * @param selection row, receiver and condition looked at
  * @param sheet the last result at receiver and condition; empty if there is none
  * @param trace the account of the row's level; empty if there is none
- * @param stale whether the result is older than the vehicle
+ * @param pending a word for results that are older than the vehicle; empty if they are not
  * @param units the unit a field is shown in, by key, where it is not the usual one
  * @param allPanels whether a thickness is changed for all panels of the construction
  */
@@ -29,13 +29,18 @@ record SheetContext(
     Selection selection,
     Optional<ReceiverSheet> sheet,
     Optional<Trace> trace,
-    boolean stale,
+    String pending,
     Map<String, Unit> units,
     boolean allPanels) {
 
   /** The same, with another vehicle. */
   SheetContext in(Vehicle other) {
-    return new SheetContext(other, selection, sheet, trace, stale, units, allPanels);
+    return new SheetContext(other, selection, sheet, trace, pending, units, allPanels);
+  }
+
+  /** Whether the result is older than the vehicle. */
+  boolean stale() {
+    return !pending.isEmpty();
   }
 
   /** Id of the row. */

@@ -46,7 +46,7 @@ final class SheetEntries {
     if (source.isPresent()) {
       source(new SourceEntries(source.get()));
     } else if (node.isPresent()) {
-      node(node.get() instanceof Panel);
+      node(node.get());
     }
     return groups;
   }
@@ -66,8 +66,14 @@ final class SheetEntries {
     settings(false, "Holds in the whole vehicle unless set again below.");
   }
 
-  private void node(boolean panel) {
-    settings(panel, panel ? "" : "Holds below this section unless set again there.");
+  private void node(Node node) {
+    boolean measured = node instanceof Panel it && it.measured() != null;
+    String panelNote =
+        measured
+            ? "A measured level difference stands for build and lay-up; they do not change the level."
+            : "";
+    boolean panel = node instanceof Panel;
+    settings(panel, panel ? panelNote : "Holds below this section unless set again there.");
     add("budget", "Allowance, " + where(), new BudgetEntries(context).allowance());
     add("supplier", "Supplier", new BuildEntries(context).supplier());
   }

@@ -8,7 +8,7 @@ import java.util.List;
  *
  * @param key stable name, unique on the sheet
  * @param label what stands before it
- * @param spoken what a screen reader says: label with unit
+ * @param spoken its whole name, where the label is a short one
  * @param kind how it is edited
  * @param text its text; of a choice the name of what is chosen
  * @param chosen id of what is chosen; empty if it is no choice or nothing is
@@ -93,6 +93,11 @@ public record SheetField(
   public record Only(String words, boolean on) {
     /** It cannot be special. */
     public static final Only NEVER = new Only("", false);
+  }
+
+  /** Its whole name with its unit, for screen readers. */
+  public String spokenWithUnit() {
+    return unit.isEmpty() ? spoken : spoken + ", " + unit;
   }
 
   /** Whether it can be typed into or chosen from. */

@@ -75,9 +75,10 @@ public final class SheetPresenter {
                         state.selection().rowId(),
                         state.selection().conditionId(),
                         state.selection().receiverId()));
-    boolean stale = state.stale() && !state.unusable();
+    String late = state.unusable() ? "not computed" : "computing";
+    String pending = state.stale() ? late : "";
     return new SheetContext(
-        state.vehicle(), state.selection(), state.sheet(), trace, stale, units, allPanels);
+        state.vehicle(), state.selection(), state.sheet(), trace, pending, units, allPanels);
   }
 
   /** The sheet as it stands now. */

@@ -10,7 +10,7 @@ import javax.swing.Icon;
 
 /** An arrow that turns back: the way from an own value to the one that held before. */
 final class BackIcon implements Icon {
-  private static final int SIZE = 12;
+  private static final int SIZE = 11;
 
   @Override
   public void paintIcon(Component component, Graphics graphics, int x, int y) {
@@ -24,8 +24,8 @@ final class BackIcon implements Icon {
     arrow.lineTo(1.5, 4.5);
     arrow.lineTo(4.5, 7.5);
     arrow.moveTo(1.5, 4.5);
-    arrow.lineTo(7.5, 4.5);
-    arrow.curveTo(11.8, 4.5, 11.8, 10.5, 7.5, 10.5);
+    arrow.lineTo(7.0, 4.5);
+    arrow.curveTo(11.2, 4.5, 11.2, 10.5, 7.0, 10.5);
     arrow.lineTo(5.5, 10.5);
     g.draw(arrow);
     g.dispose();

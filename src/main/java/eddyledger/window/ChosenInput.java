@@ -45,7 +45,7 @@ final class ChosenInput implements SheetInput, FocusListener {
 
   @Override
   public void show(SheetField field) {
-    Theme.named(box, "sheet." + key, field.label());
+    Theme.named(box, "sheet." + key, field.spoken());
     showing = true;
     if (!offered.equals(field.options())) {
       offered = field.options();

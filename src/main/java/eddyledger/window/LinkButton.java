@@ -11,7 +11,7 @@ import javax.swing.JButton;
 
 /** A button that looks like a line of text; underlined under the mouse and with the focus. */
 final class LinkButton extends JButton {
-  private static final int GAP = 4;
+  private static final int GAP = 3;
 
   LinkButton(Icon icon, String text) {
     super(text, icon);

@@ -6,9 +6,13 @@ import eddyledger.present.SheetMessage;
 import eddyledger.present.SheetPresenter;
 import eddyledger.present.SheetText;
 import java.awt.Color;
+import java.awt.Component;
 import java.awt.Dimension;
 import java.awt.Font;
 import java.awt.Rectangle;
+import java.awt.event.FocusAdapter;
+import java.awt.event.FocusEvent;
+import java.awt.event.FocusListener;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -31,13 +35,19 @@ final class SheetForm extends JPanel implements Scrollable {
   private final SheetPresenter presenter;
   private final JComponent traceButton;
   private final Map<String, JComponent> lines = new LinkedHashMap<>();
+  private final FocusListener intoSight =
+      new FocusAdapter() {
+        @Override
+        public void focusGained(FocusEvent event) {
+          SheetView.reveal((JComponent) event.getComponent());
+        }
+      };
   private final List<String> wanted = new ArrayList<>();
 
   SheetForm(SheetPresenter presenter, JComponent traceButton) {
     super(
         new MigLayout(
-            "insets 10 16 12 12, gap 0, wrap 1, fillx, hidemode 3, novisualpadding",
-            "[grow,fill]"));
+            "insets 10 16 12 4, gap 0, wrap 1, fillx, hidemode 3, novisualpadding", "[grow,fill]"));
     this.presenter = presenter;
     this.traceButton = traceButton;
   }
@@ -114,11 +124,22 @@ final class SheetForm extends JPanel implements Scrollable {
     if (line == null) {
       line = maker.get();
       lines.put(key, line);
+      follow(line);
       add(line, constraints, Math.min(placeOf(index), getComponentCount()));
     }
     @SuppressWarnings("unchecked")
     T typed = (T) line;
     return typed;
+  }
+
+  /** Whatever takes the focus comes into sight. */
+  private void follow(JComponent line) {
+    line.addFocusListener(intoSight);
+    for (Component part : line.getComponents()) {
+      if (part instanceof JComponent component && !(part instanceof JLabel)) {
+        component.addFocusListener(intoSight);
+      }
+    }
   }
 
   /** After the line wanted before it, so that lines about to go do not count. */

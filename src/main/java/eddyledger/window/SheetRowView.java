@@ -23,6 +23,8 @@ import net.miginfocom.swing.MigLayout;
 final class SheetRowView extends JPanel {
   private static final int MESSAGE_WIDTH = 214;
   private static final int LONGEST_NUMBER = 12;
+  private static final String ORIGIN = ", wmin 0, growx";
+  private static final String BACK = ", wmin 0, growx, h 20!";
   private static final int CHOICE = 118;
   private static final int WIDE_CHOICE = 156;
   private static final int ROOM_FOR_ARROW = 25;
@@ -46,7 +48,7 @@ final class SheetRowView extends JPanel {
     layout =
         new MigLayout(
             "insets 0, gap 0, hidemode 3, novisualpadding",
-            "[98!][78!]6[34!]4[grow,fill]",
+            "[98!][78!]6[34!]3[grow,fill]",
             "[22::,center][]0[]");
     setLayout(layout);
     setOpaque(false);
@@ -57,9 +59,8 @@ final class SheetRowView extends JPanel {
     add(label, "cell 0 0, wmin 0, wmax 96");
     add(input.component(), place(field));
     add(unit, "cell 2 0, wmin 0");
-    String behind = field.kind() == Kind.CHOICE ? "cell 1 0, gapleft 4" : "cell 3 0";
-    add(origin, behind + ", wmin 0, growx");
-    add(back, behind + ", wmin 0, growx, h 20!");
+    add(origin, behind(field) + ORIGIN);
+    add(back, behind(field) + BACK);
     add(message, "cell 1 1 3 1, growx, wmin 0, gapbottom 4");
     add(link, "cell 1 2 3 1, h 20!, wmin 0");
     input.component().setComponentPopupMenu(menu);
@@ -85,13 +86,22 @@ final class SheetRowView extends JPanel {
     if (field.kind() == Kind.CHOICE) {
       return "cell 1 0 3 1, h 20!, w " + (fits(field) ? CHOICE : WIDE_CHOICE) + "!";
     }
-    boolean wide = field.text().length() > LONGEST_NUMBER;
-    return (wide ? "cell 1 0 2 1, w 118!" : "cell 1 0, w 78!") + ", h 20!";
+    String size = wide(field) ? "cell 1 0 3 1, w " + WIDE_CHOICE + "!" : "cell 1 0, w 78!";
+    return size + ", h 20!";
   }
 
   /** Whether a choice is aligned with the fields above it; else it leaves a short origin only. */
   private static boolean fits(SheetField field) {
     return Digits.width(Theme.body(), field.text()) + ROOM_FOR_ARROW <= CHOICE;
+  }
+
+  /** Whether a number needs more room than numbers have, as a table of them does. */
+  private static boolean wide(SheetField field) {
+    return field.kind() == Kind.NUMBER && field.text().length() > LONGEST_NUMBER;
+  }
+
+  private static String behind(SheetField field) {
+    return field.kind() == Kind.CHOICE || wide(field) ? "cell 1 0, gapleft 4" : "cell 3 0";
   }
 
   /** The component that takes the focus. */
@@ -104,12 +114,14 @@ final class SheetRowView extends JPanel {
     shown = field;
     Palette palette = Theme.palette();
     layout.setComponentConstraints(input.component(), place(field));
+    layout.setComponentConstraints(origin, behind(field) + ORIGIN);
+    layout.setComponentConstraints(back, behind(field) + BACK);
     label.setText(field.label());
-    label.setToolTipText(field.label());
+    label.setToolTipText(field.spoken());
     boolean faint = !field.own() && field.weight() != Weight.RESULT;
     label.setForeground(faint ? palette.ink2() : palette.ink());
     unit.setText(field.unit());
-    unit.setVisible(field.kind() != Kind.CHOICE && field.text().length() <= LONGEST_NUMBER);
+    unit.setVisible(field.kind() != Kind.CHOICE && !wide(field));
     unit.setForeground(palette.ink2());
     boolean several = !field.units().isEmpty();
     unit.setCursor(several ? Cursor.getPredefinedCursor(Cursor.HAND_CURSOR) : null);
@@ -120,7 +132,7 @@ final class SheetRowView extends JPanel {
     link.setVisible(!field.link().isEmpty());
     link.setText(field.link());
     link.setForeground(palette.accent());
-    Theme.named(link, "sheet." + field.key() + ".link", field.label() + ": " + field.link());
+    Theme.named(link, "sheet." + field.key() + ".link", field.spoken() + ": " + field.link());
     message(message, field.message(), palette);
   }
 
@@ -138,11 +150,11 @@ final class SheetRowView extends JPanel {
     origin.setForeground(fresh ? palette.stateText(state) : ink);
     origin.setFont(fresh ? Theme.strong(12) : Theme.small());
     back.setVisible(way);
-    boolean narrow = field.kind() == Kind.CHOICE && !fits(field);
+    boolean narrow = wide(field) || field.kind() == Kind.CHOICE && !fits(field);
     back.setText(narrow ? "back" : special ? field.origin() : field.back());
     back.setForeground(palette.ink2());
     back.setToolTipText(SheetInput.tip(field.origin() + "; " + field.back()));
-    Theme.named(back, "sheet." + field.key() + ".back", field.label() + ": " + field.back());
+    Theme.named(back, "sheet." + field.key() + ".back", field.spoken() + ": " + field.back());
   }
 
   /** Shows a message in the ink of its severity; hides the text if there is none. */

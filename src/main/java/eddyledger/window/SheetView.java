@@ -3,9 +3,7 @@ package eddyledger.window;
 import eddyledger.present.SheetPresenter;
 import java.awt.BorderLayout;
 import java.awt.Dimension;
-import java.awt.KeyboardFocusManager;
 import java.awt.Rectangle;
-import java.beans.PropertyChangeListener;
 import javax.swing.BorderFactory;
 import javax.swing.JButton;
 import javax.swing.JComponent;
@@ -22,7 +20,6 @@ public final class SheetView extends JPanel {
   private final SheetPresenter presenter;
   private final JButton trace = new LinkButton(null, "How this level comes about");
   private final SheetForm form;
-  private final PropertyChangeListener follow = event -> followFocus(event.getNewValue());
   private String row = "";
 
   /**
@@ -36,9 +33,10 @@ public final class SheetView extends JPanel {
     trace.addActionListener(event -> showTrace.run());
     Theme.named(trace, "sheet.trace", trace.getText());
     form = new SheetForm(presenter, trace);
+    // the bar keeps its room, so that lines do not shift when it comes; its track is not seen
     JScrollPane scroll =
         new JScrollPane(
-            form, JScrollPane.VERTICAL_SCROLLBAR_AS_NEEDED, JScrollPane.HORIZONTAL_SCROLLBAR_NEVER);
+            form, JScrollPane.VERTICAL_SCROLLBAR_ALWAYS, JScrollPane.HORIZONTAL_SCROLLBAR_NEVER);
     scroll.setBorder(BorderFactory.createEmptyBorder());
     scroll.getVerticalScrollBar().setUnitIncrement(22);
     add(scroll);
@@ -76,29 +74,8 @@ public final class SheetView extends JPanel {
     }
   }
 
-  @Override
-  public void addNotify() {
-    super.addNotify();
-    focusManager().addPropertyChangeListener("focusOwner", follow);
-  }
-
-  @Override
-  public void removeNotify() {
-    focusManager().removePropertyChangeListener("focusOwner", follow);
-    super.removeNotify();
-  }
-
-  private static KeyboardFocusManager focusManager() {
-    return KeyboardFocusManager.getCurrentKeyboardFocusManager();
-  }
-
-  private void followFocus(Object owner) {
-    if (owner instanceof JComponent component && SwingUtilities.isDescendingFrom(component, form)) {
-      reveal(component);
-    }
-  }
-
-  private static void reveal(JComponent component) {
+  /** Scrolls a field into sight, with a line above and below. */
+  static void reveal(JComponent component) {
     component.scrollRectToVisible(
         new Rectangle(
             0, -LINES_AROUND, component.getWidth(), component.getHeight() + 2 * LINES_AROUND));

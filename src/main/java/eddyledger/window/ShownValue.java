@@ -34,7 +34,7 @@ final class ShownValue implements SheetInput {
   @Override
   public void show(SheetField field) {
     Palette palette = Theme.palette();
-    Theme.named(component(), "sheet." + key, field.spoken());
+    Theme.named(component(), "sheet." + key, field.spokenWithUnit());
     boolean strong = field.weight() == Weight.RESULT;
     Color ink = field.weight() == Weight.FAINT ? palette.ink2() : palette.ink();
     Color stated = field.state() == null || !strong ? ink : palette.stateText(field.state());

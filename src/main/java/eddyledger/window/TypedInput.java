@@ -59,7 +59,7 @@ final class TypedInput implements SheetInput, FocusListener, DocumentListener {
 
   @Override
   public void show(SheetField field) {
-    Theme.named(text, "sheet." + key, field.spoken());
+    Theme.named(text, "sheet." + key, field.spokenWithUnit());
     if (!waiting && !text.getText().equals(field.text())) {
       showing = true;
       text.setText(field.text());
@@ -97,6 +97,9 @@ final class TypedInput implements SheetInput, FocusListener, DocumentListener {
   private void flush() {
     if (waiting) {
       waiting = false;
+      if (!text.isDisplayable()) {
+        return; // another row's sheet has come meanwhile
+      }
       presenter.type(key, text.getText());
     }
   }

@@ -2,6 +2,8 @@ package eddyledger.window;
 
 import java.awt.Dimension;
 import javax.swing.JTextArea;
+import javax.swing.SwingUtilities;
+import javax.swing.text.DefaultCaret;
 
 /** Text that wraps at its width and takes the height it needs; only to be read. */
 final class WrapText extends JTextArea {
@@ -20,6 +22,10 @@ final class WrapText extends JTextArea {
     setOpaque(false);
     setBorder(null);
     setFont(Theme.small());
+    // the caret would scroll the sheet to whatever text changed last
+    DefaultCaret still = new DefaultCaret();
+    still.setUpdatePolicy(DefaultCaret.NEVER_UPDATE);
+    setCaret(still);
   }
 
   @Override
@@ -43,7 +49,7 @@ final class WrapText extends JTextArea {
     super.setBounds(x, y, width, height);
     if (width != last) {
       last = width;
-      javax.swing.SwingUtilities.invokeLater(this::revalidate);
+      SwingUtilities.invokeLater(this::revalidate);
     }
   }
 }

@@ -2,10 +2,15 @@ package eddyledger.window;
 
 import eddyledger.app.Computation;
 import eddyledger.app.ComputedLedger;
+import eddyledger.app.Edit;
 import eddyledger.app.ProjectState;
 import eddyledger.app.Projects;
 import eddyledger.chart.Palette;
 import eddyledger.file.ProjectReader;
+import eddyledger.model.BandTable;
+import eddyledger.model.ByCondition;
+import eddyledger.model.JudgedBands;
+import eddyledger.model.TreeEdit;
 import eddyledger.model.Vehicle;
 import eddyledger.present.SheetPresenter;
 import eddyledger.quantity.Progress;
@@ -45,11 +50,13 @@ public final class SheetSample {
       sample.draw("panel-" + palette, 760, it -> it.select("crown-a"));
       sample.draw("whole-" + palette, 1080, it -> it.select("crown-a"));
       sample.draw("own-" + palette, 1120, SheetSample::own);
+      sample.draw("bands-" + palette, 760, SheetSample::bands);
       sample.draw("faults-" + palette, 900, SheetSample::faults);
-      sample.draw("section-" + palette, 760, it -> it.select("station-a"));
+      sample.draw("section-" + palette, 560, it -> it.select("station-a"));
       sample.draw("vehicle-" + palette, 1080, it -> it.select("quillon-82"));
       sample.draw("source-" + palette, 760, it -> it.select("propulsion-row-2-cruise"));
     }
+    sample.switched();
     System.exit(0);
   }
 
@@ -78,6 +85,35 @@ public final class SheetSample {
     it.type("lossFactor", "0.09");
     it.presenter.enter("length");
     it.presenter.type("length", "1,234");
+  }
+
+  private static void bands(SheetSample it) {
+    it.select("crown-a");
+    it.state.apply(
+        Edit.of(
+            "loss factor per band",
+            "crown-a",
+            vehicle ->
+                TreeEdit.settings(
+                    vehicle,
+                    "crown-a",
+                    settings ->
+                        settings
+                            .edit()
+                            .lossFactor(
+                                ByCondition.always(
+                                    JudgedBands.of(BandTable.octaves("125", 0.02, 0.04, 0.06))))
+                            .localSpeed(null)
+                            .build())));
+    it.presenter.link("thickness");
+    it.state.apply(
+        Edit.of(
+            "no zone",
+            "crown-a",
+            vehicle ->
+                TreeEdit.settings(
+                    vehicle, "station-a", settings -> settings.edit().localSpeed(null).build())));
+    it.compute();
   }
 
   private void compute() {
@@ -109,6 +145,32 @@ public final class SheetSample {
           g.dispose();
           frame[0].dispose();
           save(image, name);
+        });
+  }
+
+  /** The theme changes while the sheet is open. */
+  private void switched() throws Exception {
+    JFrame[] frame = new JFrame[1];
+    SwingUtilities.invokeAndWait(
+        () -> {
+          Theme.install(Palette.LIGHT);
+          own(this);
+          frame[0] = new JFrame();
+          frame[0].getContentPane().add(new SheetView(presenter, () -> {}));
+          frame[0].setSize(348, 1000);
+          frame[0].setVisible(true);
+        });
+    Thread.sleep(SETTLE_MS);
+    SwingUtilities.invokeAndWait(() -> Theme.install(Palette.DARK));
+    Thread.sleep(SETTLE_MS);
+    SwingUtilities.invokeAndWait(
+        () -> {
+          BufferedImage image = new BufferedImage(348, 1000, BufferedImage.TYPE_INT_RGB);
+          Graphics2D g = image.createGraphics();
+          frame[0].getContentPane().printAll(g);
+          g.dispose();
+          frame[0].dispose();
+          save(image, "switched");
         });
   }
 
