@@ -52,7 +52,8 @@ class ArchitectureTest {
           new Layer("spread", COMMONS_MATH),
           new Layer("bridge"),
           new Layer("file", JACKSON),
-          new Layer("workbook", "org.apache.poi..", "org.openxmlformats.."),
+          new Layer(
+              "workbook", "org.apache.poi..", "org.openxmlformats..", "org.apache.xmlbeans.."),
           new Layer("chart", "org.jfree..", "java.awt..", "javax.swing..", ACCESSIBILITY),
           new Layer("app"),
           new Layer("command", PICOCLI),
@@ -61,6 +62,7 @@ class ArchitectureTest {
               "window",
               "javax.swing..",
               "java.awt..",
+              "java.beans..",
               ACCESSIBILITY,
               "com.formdev..",
               "net.miginfocom.."));

@@ -6,6 +6,7 @@ import eddyledger.app.Projects;
 import eddyledger.app.Tables;
 import eddyledger.app.Workbooks;
 import eddyledger.command.MainCommand;
+import eddyledger.command.NoDisplay;
 import eddyledger.file.ProjectReader;
 import java.io.IOException;
 import java.io.PrintWriter;
@@ -40,7 +41,8 @@ class ReadmeTest {
     PrintWriter writer = new PrintWriter(out);
     Projects projects = new Projects(new ProjectReader());
     int code =
-        new MainCommand(projects, new Tables(), new Workbooks(), writer, writer).run(arguments);
+        new MainCommand(projects, new Tables(), new Workbooks(), new NoDisplay(), writer, writer)
+            .run(arguments);
     assertThat(code).as(out.toString()).isZero();
     return out.toString();
   }

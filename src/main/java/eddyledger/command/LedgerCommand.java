@@ -5,10 +5,12 @@ import static eddyledger.command.Figures.margin;
 
 import eddyledger.app.Projects;
 import eddyledger.app.Tables;
+import eddyledger.app.Workbooks;
 import eddyledger.check.Cautions;
 import eddyledger.ledger.Judgement;
 import eddyledger.ledger.Ledger;
 import eddyledger.ledger.ReceiverSheet;
+import eddyledger.quantity.Progress;
 import java.io.PrintWriter;
 import java.nio.file.Path;
 import java.util.List;
@@ -31,6 +33,7 @@ import picocli.CommandLine.Spec;
 final class LedgerCommand implements Callable<Integer> {
   private final Projects projects;
   private final Tables tables;
+  private final Workbooks workbooks;
 
   @Mixin private ProjectArguments project;
 
@@ -39,16 +42,26 @@ final class LedgerCommand implements Callable<Integer> {
   @Option(names = "--csv", paramLabel = "OUT", description = "Writes the ledger as CSV.")
   private Path csv;
 
+  @Option(
+      names = "--workbook",
+      paramLabel = "OUT.xlsx",
+      description = "Writes the budget workbook of every receiver and condition.")
+  private Path workbook;
+
   @Spec private CommandSpec spec;
 
-  LedgerCommand(Projects projects, Tables tables) {
+  LedgerCommand(Projects projects, Tables tables, Workbooks workbooks) {
     this.projects = projects;
     this.tables = tables;
+    this.workbooks = workbooks;
   }
 
   @Override
   public Integer call() {
     project.spare(csv, spec);
+    if (workbook != null) {
+      project.workbook(workbook, spec);
+    }
     Session session = Session.open(projects, project);
     List<ReceiverSheet> sheets = which.among(session.ledger());
     PrintWriter out = spec.commandLine().getOut();
@@ -65,6 +78,10 @@ final class LedgerCommand implements Callable<Integer> {
     if (csv != null) {
       tables.writeLedger(sheets, csv);
       out.println("Written: " + csv);
+    }
+    if (workbook != null) {
+      workbooks.write(session.ledger(), session.findings(), workbook, Progress.NONE);
+      out.println("Written: " + workbook);
     }
     return project.failOn.exitCode(session.ledger(), session.findings());
   }

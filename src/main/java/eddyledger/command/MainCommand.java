@@ -23,6 +23,7 @@ import picocli.CommandLine.Command;
     })
 public final class MainCommand implements Runnable {
   private final CommandLine line;
+  private final WindowStarter window;
 
   /**
    * The command line.
@@ -30,17 +31,25 @@ public final class MainCommand implements Runnable {
    * @param projects opens project files
    * @param tables writes tables
    * @param workbooks writes workbooks
+   * @param window opens the window
    * @param out where results go
    * @param err where complaints go
    */
   public MainCommand(
-      Projects projects, Tables tables, Workbooks workbooks, PrintWriter out, PrintWriter err) {
+      Projects projects,
+      Tables tables,
+      Workbooks workbooks,
+      WindowStarter window,
+      PrintWriter out,
+      PrintWriter err) {
+    this.window = window;
     line =
         new CommandLine(this)
             .addSubcommand(new CheckCommand(projects))
-            .addSubcommand(new LedgerCommand(projects, tables))
+            .addSubcommand(new LedgerCommand(projects, tables, workbooks))
             .addSubcommand(new TraceCommand(projects, tables))
-            .addSubcommand(new WorkbookCommand(projects, workbooks));
+            .addSubcommand(new WorkbookCommand(projects, workbooks))
+            .addSubcommand(new WindowCommand(window));
     line.setOut(out);
     line.setErr(err);
     line.setCaseInsensitiveEnumValuesAllowed(true);
@@ -66,9 +75,13 @@ public final class MainCommand implements Runnable {
     }
   }
 
-  /** Without a command there is only help to give. */
+  /** Without a command the window opens, or help is given where there is no display. */
   @Override
   public void run() {
-    line.usage(line.getOut());
+    if (window.possible()) {
+      window.open(null);
+    } else {
+      line.usage(line.getOut());
+    }
   }
 }

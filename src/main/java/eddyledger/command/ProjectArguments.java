@@ -3,6 +3,7 @@ package eddyledger.command;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.Locale;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.ParameterException;
@@ -33,6 +34,19 @@ final class ProjectArguments {
       throw new ParameterException(
           spec.commandLine(), table + " is the project itself; name another file for the table.");
     }
+  }
+
+  /**
+   * Sees to it that a workbook has a name that opens as one, and is not written over the project.
+   *
+   * @throws ParameterException if the name does not fit
+   */
+  void workbook(Path out, CommandSpec spec) {
+    if (!out.toString().toLowerCase(Locale.ROOT).endsWith(".xlsx")) {
+      throw new ParameterException(
+          spec.commandLine(), out + " is no name for a workbook; it must end in .xlsx.");
+    }
+    spare(out, spec);
   }
 
   private boolean isFile(Path other) {

@@ -6,12 +6,10 @@ import eddyledger.check.Cautions;
 import eddyledger.quantity.Progress;
 import java.io.PrintWriter;
 import java.nio.file.Path;
-import java.util.Locale;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
-import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Parameters;
 import picocli.CommandLine.Spec;
 
@@ -41,11 +39,7 @@ final class WorkbookCommand implements Callable<Integer> {
 
   @Override
   public Integer call() {
-    if (!out.toString().toLowerCase(Locale.ROOT).endsWith(".xlsx")) {
-      throw new ParameterException(
-          spec.commandLine(), out + " is no name for a workbook; it must end in .xlsx.");
-    }
-    project.spare(out, spec);
+    project.workbook(out, spec);
     Session session = Session.open(projects, project);
     workbooks.write(session.ledger(), session.findings(), out, Progress.NONE);
     PrintWriter printer = spec.commandLine().getOut();

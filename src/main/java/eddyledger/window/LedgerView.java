@@ -53,6 +53,7 @@ public final class LedgerView extends JPanel {
     scroll.setHorizontalScrollBarPolicy(ScrollPaneConstants.HORIZONTAL_SCROLLBAR_NEVER);
     add(scroll);
     LedgerKeys.install(table, presenter);
+    DeskView.release(table, "F2", "F8", "shift F8", "ctrl P");
     table.getSelectionModel().addListSelectionListener(this::selected);
     table.addMouseListener(new Clicks());
     table.addFocusListener(new Focus());

@@ -36,8 +36,10 @@ record CommandRun(int code, String out, String err) {
       Projects projects, PrintWriter writer, StringWriter out, Object... arguments) {
     StringWriter err = new StringWriter();
     String[] words = Arrays.stream(arguments).map(String::valueOf).toArray(String[]::new);
+    PrintWriter complaints = new PrintWriter(err);
     int code =
-        new MainCommand(projects, new Tables(), new Workbooks(), writer, new PrintWriter(err))
+        new MainCommand(
+                projects, new Tables(), new Workbooks(), new NoDisplay(), writer, complaints)
             .run(words);
     return new CommandRun(code, out.toString(), err.toString());
   }

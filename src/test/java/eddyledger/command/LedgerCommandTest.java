@@ -24,7 +24,12 @@ class LedgerCommandTest {
   private int run(String... arguments) {
     Projects projects = new Projects(new ProjectReader());
     return new MainCommand(
-            projects, new Tables(), new Workbooks(), new PrintWriter(out), new PrintWriter(err))
+            projects,
+            new Tables(),
+            new Workbooks(),
+            new NoDisplay(),
+            new PrintWriter(out),
+            new PrintWriter(err))
         .run(arguments);
   }
 
@@ -57,6 +62,25 @@ class LedgerCommandTest {
   }
 
   @Test
+  void theWorkbookIsWrittenBesideTheTable(@TempDir Path folder) {
+    Path workbook = folder.resolve("budget.xlsx");
+    assertThat(run("ledger", EXAMPLE, "--workbook", workbook.toString())).isZero();
+    assertThat(workbook).isNotEmptyFile();
+    assertThat(out.toString()).contains("Written: " + workbook, "<- worst margin");
+    assertThat(run("ledger", EXAMPLE, "--workbook", folder.resolve("budget.ods").toString()))
+        .isEqualTo(ExitCode.USAGE);
+    assertThat(err.toString()).contains("must end in .xlsx");
+  }
+
+  @Test
+  void withoutADisplayTheWindowIsRefusedAndNothingElse() {
+    assertThat(run("window", EXAMPLE)).isEqualTo(ExitCode.USAGE);
+    assertThat(err.toString()).contains("no display");
+    assertThat(run()).isZero();
+    assertThat(out.toString()).contains("Usage: eddyledger");
+  }
+
+  @Test
   void aTableThatCannotBeWrittenIsSaidAndHarmsNothing(@TempDir Path folder) {
     String nowhere = folder.resolve("none").resolve("ledger.csv").toString();
     assertThat(run("ledger", EXAMPLE, "--csv", nowhere)).isEqualTo(ExitCode.UNUSABLE);
@@ -66,7 +90,7 @@ class LedgerCommandTest {
 
   @Test
   void everyCommandHasHelp() {
-    for (String command : new String[] {"check", "ledger", "trace"}) {
+    for (String command : new String[] {"check", "ledger", "trace", "workbook", "window"}) {
       assertThat(run(command, "--help")).isZero();
     }
     assertThat(out.toString()).contains("--condition", "--csv", "--fail-on", "PANEL-ID");

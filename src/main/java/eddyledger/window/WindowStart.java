@@ -1,0 +1,46 @@
+package eddyledger.window;
+
+import eddyledger.command.WindowStarter;
+import java.awt.GraphicsEnvironment;
+import java.nio.file.Path;
+import java.util.concurrent.CountDownLatch;
+import java.util.function.Supplier;
+import javax.swing.SwingUtilities;
+
+/** Opens the window on the event thread and waits for its end. */
+public final class WindowStart implements WindowStarter {
+  private final Supplier<Services> services;
+
+  /**
+   * With what the window will work with; asked for only when it opens, so that the command line
+   * does without.
+   */
+  public WindowStart(Supplier<Services> services) {
+    this.services = services;
+  }
+
+  @Override
+  public boolean possible() {
+    return !GraphicsEnvironment.isHeadless();
+  }
+
+  @Override
+  public void open(Path file) {
+    // smooth text where the desktop does not ask for it
+    if (System.getProperty("awt.useSystemAAFontSettings") == null) {
+      System.setProperty("awt.useSystemAAFontSettings", "on");
+    }
+    CountDownLatch closed = new CountDownLatch(1);
+    SwingUtilities.invokeLater(
+        () -> {
+          Services with = services.get();
+          Thread.setDefaultUncaughtExceptionHandler(new UncaughtFaults(with.faults()));
+          new Application(with, closed::countDown).show(file);
+        });
+    try {
+      closed.await();
+    } catch (InterruptedException e) {
+      Thread.currentThread().interrupt();
+    }
+  }
+}
