@@ -84,7 +84,7 @@ final class JudgementWriter {
     margin(line, row, looks);
     line.formula(
         LedgerColumns.STATE,
-        new LedgerFormulas(line.number()).state(),
+        new JudgementFormulas(line.number()).state(),
         Results.state(row),
         looks.result(Format.WORD));
   }
@@ -92,7 +92,7 @@ final class JudgementWriter {
   private static void margin(Line line, LedgerRow row, LedgerLooks looks) {
     line.formula(
         LedgerColumns.MARGIN,
-        new LedgerFormulas(line.number()).margin(),
+        new JudgementFormulas(line.number()).margin(),
         Results.margin(row.judgement().allowance(), row.levelA()),
         looks.result(Format.MARGIN));
   }
@@ -112,7 +112,7 @@ final class JudgementWriter {
         looks.result(Format.LEVEL));
     line.formula(
         LedgerColumns.MARGIN,
-        new LedgerFormulas(line.number()).margin(),
+        new JudgementFormulas(line.number()).margin(),
         Results.margin(allowed, row.levelA()),
         looks.result(Format.MARGIN));
     line.text(LedgerColumns.STATE, Answer.NOT_ASKED, word);

@@ -81,7 +81,7 @@ final class PairTable {
             block.total().contributions(),
             block.total().lacking(),
             Results.nothing(total.status()));
-    line.formula(9, LedgerFormulas.statusOf(at), status, text.indented(1));
+    line.formula(9, JudgementFormulas.statusOf(at), status, text.indented(1));
     range(line, block);
     line.height(
         Heights.most(

@@ -168,7 +168,7 @@ final class TargetTable {
         "IF(ISNUMBER("
             + judged
             + "),"
-            + LedgerFormulas.state(left, lacks)
+            + JudgementFormulas.state(left, lacks)
             + ",IF(AND("
             + judged
             + "=\"none\","
