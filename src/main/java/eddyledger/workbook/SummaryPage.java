@@ -38,7 +38,7 @@ final class SummaryPage {
     new PairTable(page, plan).write();
     targets();
     new LargestTable(page, plan).write();
-    page.hide(TargetTable.LACKING, TargetTable.ENERGY);
+    page.hide(TargetTable.LACKING, TargetTable.KEY);
   }
 
   private void heading() {

@@ -4,7 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 import static org.assertj.core.api.Assertions.within;
 
-import eddyledger.ledger.Cautions;
+import eddyledger.check.Cautions;
 import eddyledger.ledger.LedgerRow;
 import eddyledger.ledger.ReceiverSheet;
 import eddyledger.quantity.Progress;
@@ -111,6 +111,7 @@ class BudgetWorkbookTest {
             "SUMIFS",
             "SUMPRODUCT",
             "COUNT",
+            "ROW",
             "COUNTIF",
             "COUNTIFS",
             "AND",
