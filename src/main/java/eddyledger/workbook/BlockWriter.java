@@ -12,7 +12,8 @@ import eddyledger.workbook.Look.Format;
 
 /** Writes one receiver and condition on the ledger sheet. */
 final class BlockWriter {
-  private static final int NOTE_CHARACTERS = 260;
+  /** Size of a heading's letters over that of the body. */
+  private static final double HEADING_SIZE = 1.3;
 
   private final Page page;
   private final BookPlan plan;
@@ -36,18 +37,25 @@ final class BlockWriter {
 
   private void heading(Block block) {
     Look small = Look.of(Format.TEXT, Emphasis.SMALL);
+    Look heading = Look.of(Format.TEXT, Emphasis.HEADING);
+    String receiver = block.sheet().receiver().name() + " (" + block.pair().receiver() + ")";
+    String condition =
+        "in " + block.sheet().condition().name() + " (" + block.pair().condition() + ")";
+    // the condition stands beside the repeated columns on both pages of a print
     page.line(block.title())
-        .height(20)
+        .height(Heights.most(20, Heights.of(receiver, widths.name() / HEADING_SIZE)))
         .text(LedgerColumns.CONDITION, block.pair().condition(), small)
         .text(LedgerColumns.RECEIVER, block.pair().receiver(), small)
-        .text(LedgerColumns.NAME, LedgerPage.title(block), Look.of(Format.TEXT, Emphasis.HEADING));
+        .text(LedgerColumns.NAME, receiver, Look.of(Format.WRAPPED, Emphasis.HEADING))
+        .text(LedgerColumns.ID, condition, heading)
+        .text(LedgerColumns.BAND, condition, heading);
     String notes = block.total().row().reason();
     page.line(block.title() + 1)
-        .height(Heights.of(notes, NOTE_CHARACTERS))
+        .height(Heights.of(notes, widths.notes()))
         .text(LedgerColumns.CONDITION, block.pair().condition(), small)
         .text(LedgerColumns.RECEIVER, block.pair().receiver(), small)
-        .text(LedgerColumns.NAME, notes, Look.of(Format.WRAPPED, Emphasis.SMALL));
-    page.merge(block.title() + 1, LedgerColumns.NAME, LedgerColumns.LAST_BAND);
+        .text(LedgerColumns.ID, notes, Look.of(Format.WRAPPED, Emphasis.SMALL));
+    page.merge(block.title() + 1, LedgerColumns.ID, LedgerColumns.REASON);
   }
 
   private void line(Block block, LedgerLine planned) {
@@ -60,8 +68,8 @@ final class BlockWriter {
     line.text(LedgerColumns.NAME, row.name(), looks.result(Format.TEXT).indented(planned.depth()));
     line.text(LedgerColumns.ID, row.id(), looks.result(Format.TEXT));
     line.text(LedgerColumns.KIND, row.kind().text(), looks.result(Format.TEXT));
-    boolean other = row.kind() == RowKind.OTHER;
-    String way = other ? Answer.NOT_ASKED : LedgerLooks.word(planned.way());
+    boolean none = row.kind() == RowKind.OTHER || planned.part() == Part.SILENT;
+    String way = none ? Answer.NOT_ASKED : LedgerLooks.word(planned.way());
     line.text(LedgerColumns.WAY, way, looks.way(planned.way()));
     overall(line, formulas, looks, Answer.level(row.levelA()), Answer.level(row.level()));
     line.formula(
@@ -106,8 +114,10 @@ final class BlockWriter {
 
   private static void reason(
       Line line, LedgerFormulas formulas, LedgerLine planned, LedgerLooks looks) {
-    Look look = looks.result(Format.WRAPPED);
-    if (planned.row().status() == Status.OK) {
+    boolean total = planned.row().kind() == RowKind.TOTAL;
+    Look look = total ? looks.result(Format.WRAPPED) : Look.of(Format.WRAPPED);
+    // what a total lacks stands in the notes above it
+    if (planned.row().status() == Status.OK || total) {
       if (planned.part() == Part.SILENT) {
         line.text(LedgerColumns.REASON, "holds no panel", look);
       } else {
@@ -116,7 +126,11 @@ final class BlockWriter {
       return;
     }
     String reason = planned.row().reason();
-    line.formula(LedgerColumns.REASON, formulas.reason(), Answer.words(reason), look);
+    line.formula(
+        LedgerColumns.REASON,
+        new JudgementFormulas(planned.number()).reason(),
+        Answer.words(reason),
+        look);
     line.text(LedgerColumns.NOTE, reason, Look.of(Format.TEXT));
     line.height(Heights.most(Heights.of(reason, LedgerWidths.REASON)));
   }
@@ -178,7 +192,7 @@ final class BlockWriter {
               + "-"
               + Columns.cell(LedgerColumns.LINE, planned.number())
               + "*"
-              + LedgerFormulas.NOISE
+              + JudgementFormulas.NOISE
               + ",\"\")";
       double levelA = row.levelA();
       Answer key =

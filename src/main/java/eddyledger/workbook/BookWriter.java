@@ -94,7 +94,7 @@ final class BookWriter {
     new LedgerPage(page, plan).write(title("ledger"), progress);
     Frame frame =
         frame(page, PaperSize.A3_PAPER, LedgerColumns.HEADER_ROW, LedgerColumns.LAST_BAND);
-    frame.inTwo(LedgerColumns.BAND, LedgerColumns.LAST_BAND, LedgerColumns.NAME, blockHeight());
+    frame.inTwo(LedgerColumns.BAND, LedgerColumns.LAST_BAND, LedgerColumns.NAME, blockHeight(page));
     frame.filter(LedgerColumns.HEADER_ROW, LedgerColumns.LAST_BAND, plan.lastLedgerRow());
     frame.freeze(LedgerColumns.NAME + 1, LedgerColumns.HEADER_ROW);
     ValueFormats formats = new ValueFormats(page);
@@ -110,12 +110,12 @@ final class BookWriter {
   }
 
   /** Height of the longest block with what stands above it, points. */
-  private double blockHeight() {
-    int rows = 0;
+  private double blockHeight(Page page) {
+    double height = 0.0;
     for (Block block : plan.blocks()) {
-      rows = Math.max(rows, block.end() - block.title() + 1);
+      height = Math.max(height, page.height(block.title(), block.end()));
     }
-    return LedgerPage.HEAD_HEIGHT + rows * Page.ROW_HEIGHT;
+    return page.height(1, LedgerColumns.HEADER_ROW) + height;
   }
 
   private void others(Page page) {

@@ -4,6 +4,8 @@ import eddyledger.quantity.Progress;
 import java.io.ByteArrayOutputStream;
 import java.io.IOException;
 import org.apache.poi.ss.usermodel.Name;
+import org.apache.poi.ss.usermodel.Sheet;
+import org.apache.poi.xssf.streaming.SXSSFSheet;
 import org.apache.poi.xssf.streaming.SXSSFWorkbook;
 import org.apache.poi.xssf.usermodel.XSSFWorkbook;
 
@@ -29,11 +31,23 @@ public final class BudgetWorkbook {
    */
   public static byte[] of(WorkbookContent content, Progress progress) throws IOException {
     try (SXSSFWorkbook workbook = new SXSSFWorkbook(new XSSFWorkbook(), WINDOW)) {
-      new BookWriter(workbook, content).write(progress);
-      progress.check();
+      try {
+        new BookWriter(workbook, content).write(progress);
+        progress.check();
+      } catch (RuntimeException e) {
+        // else closing it would complain of rows that were never written
+        flush(workbook);
+        throw e;
+      }
       ByteArrayOutputStream bytes = new ByteArrayOutputStream();
       workbook.write(bytes);
       return bytes.toByteArray();
+    }
+  }
+
+  private static void flush(SXSSFWorkbook workbook) throws IOException {
+    for (Sheet sheet : workbook) {
+      ((SXSSFSheet) sheet).flushRows();
     }
   }
 

@@ -31,6 +31,9 @@ final class FlowTable {
   /** How the source of a step says that its value was entered. */
   private static final String GIVEN = "as given";
 
+  /** How a note begins that tells of a default. */
+  private static final String DEFAULT = "default";
+
   private static final List<Field> FIELDS =
       List.of(
           Field.text("Panel"),
@@ -120,7 +123,8 @@ final class FlowTable {
         if (FILLED_IN.matcher(step.note()).find()) {
           rules.add(FILLED_IN.matcher(step.note()).replaceAll(" filled in "));
         } else if (!step.note().isEmpty()) {
-          notes.add(step.note());
+          boolean defaulted = step.note().startsWith(DEFAULT);
+          notes.add(defaulted ? step.meaning() + ": " + step.note() : step.note());
         }
       }
     }

@@ -39,35 +39,38 @@ final class JudgementWriter {
   }
 
   private void total(Line line, LedgerRow row, LedgerLooks looks) {
-    Optional<Integer> target = plan.targets().overall(block.pair());
-    if (target.isEmpty()) {
+    if (asked(TargetTable.TARGET).isEmpty()) {
       none(line, looks);
       return;
     }
     Judgement judgement = row.judgement();
-    int at = target.get();
     Look level = looks.result(Format.LEVEL);
     line.formula(
         LedgerColumns.TARGET,
-        TargetTable.outside(TargetTable.TARGET, at),
+        asked(TargetTable.TARGET).orElseThrow(),
         Answer.number(judgement.target()),
         level);
     line.formula(
         LedgerColumns.RESERVE,
-        TargetTable.outside(TargetTable.RESERVE, at),
+        asked(TargetTable.RESERVE).orElseThrow(),
         Answer.number(judgement.reserve()),
         level);
     line.formula(
         LedgerColumns.ALLOWED,
-        TargetTable.outside(TargetTable.ALLOWED, at),
+        asked(TargetTable.ALLOWED).orElseThrow(),
         Answer.number(judgement.allowance()),
         level);
     margin(line, row, looks);
     line.formula(
         LedgerColumns.STATE,
-        TargetTable.outside(TargetTable.STATE, at),
+        asked(TargetTable.STATE).orElseThrow(),
         Answer.state(judgement.state()),
         looks.result(Format.WORD));
+  }
+
+  /** A cell of the target as a formula; empty if the total has none. */
+  private Optional<String> asked(int column) {
+    return plan.targets().overall(block.pair(), column);
   }
 
   private static void allowance(Line line, LedgerRow row, LedgerLooks looks) {
@@ -84,7 +87,7 @@ final class JudgementWriter {
     margin(line, row, looks);
     line.formula(
         LedgerColumns.STATE,
-        new LedgerFormulas(line.number()).state(),
+        new JudgementFormulas(line.number()).state(),
         Results.state(row),
         looks.result(Format.WORD));
   }
@@ -92,7 +95,7 @@ final class JudgementWriter {
   private static void margin(Line line, LedgerRow row, LedgerLooks looks) {
     line.formula(
         LedgerColumns.MARGIN,
-        new LedgerFormulas(line.number()).margin(),
+        new JudgementFormulas(line.number()).margin(),
         Results.margin(row.judgement().allowance(), row.levelA()),
         looks.result(Format.MARGIN));
   }
@@ -112,7 +115,7 @@ final class JudgementWriter {
         looks.result(Format.LEVEL));
     line.formula(
         LedgerColumns.MARGIN,
-        new LedgerFormulas(line.number()).margin(),
+        new JudgementFormulas(line.number()).margin(),
         Results.margin(allowed, row.levelA()),
         looks.result(Format.MARGIN));
     line.text(LedgerColumns.STATE, Answer.NOT_ASKED, word);

@@ -30,9 +30,6 @@ final class LedgerPage {
           "Status",
           "Why there is no value");
 
-  /** Height of what stands above the first block, and of broken lines in a block, points. */
-  static final double HEAD_HEIGHT = 165.0;
-
   private static final String EXPLANATION =
       "Unweighted band levels at the receiver, dB re 20 \u00b5Pa. Levels of sections and totals are"
           + " energy sums of the rows below them; a word in place of a level adds nothing and makes"
@@ -62,8 +59,8 @@ final class LedgerPage {
     }
     page.hide(LedgerColumns.ENERGY, LedgerColumns.NOTE);
     page.line(1).height(24).text(0, title, Look.of(Format.TEXT, Emphasis.TITLE));
-    page.line(2).text(0, EXPLANATION, Look.of(Format.TEXT, Emphasis.SMALL));
-    page.line(3).text(0, HIDDEN, Look.of(Format.TEXT, Emphasis.SMALL));
+    explain(2, EXPLANATION, widths);
+    explain(3, HIDDEN, widths);
     weights();
     header();
     BlockWriter writer = new BlockWriter(page, plan, widths);
@@ -75,6 +72,14 @@ final class LedgerPage {
       }
       progress.done(i + 1, blocks.size());
     }
+  }
+
+  /** Stands beside the columns that are repeated, so that no page cuts it. */
+  private void explain(int row, String text, LedgerWidths widths) {
+    Look look = Look.of(Format.WRAPPED, Emphasis.SMALL);
+    double height = Heights.of(text, widths.notes());
+    page.line(row).height(height).text(LedgerColumns.ID, text, look);
+    page.merge(row, LedgerColumns.ID, LedgerColumns.REASON);
   }
 
   private void weights() {
@@ -111,17 +116,5 @@ final class LedgerPage {
     line.text(LedgerColumns.LACKING, "Contributions that lack bands", centre);
     line.text(LedgerColumns.RANK, "Level for the order, dB(A)", centre);
     line.text(LedgerColumns.NOTE, "The program's reason", left);
-  }
-
-  /** Name of a condition and receiver for people. */
-  static String title(Block block) {
-    return block.sheet().receiver().name()
-        + " ("
-        + block.pair().receiver()
-        + ") in "
-        + block.sheet().condition().name()
-        + " ("
-        + block.pair().condition()
-        + ")";
   }
 }

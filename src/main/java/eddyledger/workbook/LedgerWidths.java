@@ -53,6 +53,15 @@ record LedgerWidths(double[] columns) {
         });
   }
 
+  /** Width from the ids to the reasons, what stands on the first page only. */
+  double notes() {
+    double width = 0.0;
+    for (int column = LedgerColumns.ID; column <= LedgerColumns.REASON; column++) {
+      width += columns[column];
+    }
+    return width;
+  }
+
   /** Width of the names. */
   double name() {
     return columns[LedgerColumns.NAME];

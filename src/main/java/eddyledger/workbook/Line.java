@@ -1,5 +1,6 @@
 package eddyledger.workbook;
 
+import java.util.function.DoubleConsumer;
 import java.util.regex.Pattern;
 import org.apache.poi.xssf.streaming.SXSSFCell;
 import org.apache.poi.xssf.streaming.SXSSFRow;
@@ -13,15 +14,18 @@ final class Line {
 
   private final SXSSFRow row;
   private final Styles styles;
+  private final DoubleConsumer heights;
 
-  Line(SXSSFRow row, Styles styles) {
+  Line(SXSSFRow row, Styles styles, DoubleConsumer heights) {
     this.row = row;
     this.styles = styles;
+    this.heights = heights;
   }
 
   /** Sets the height in points. */
   Line height(double points) {
     row.setHeightInPoints((float) points);
+    heights.accept(points);
     return this;
   }
 

@@ -1,5 +1,7 @@
 package eddyledger.workbook;
 
+import java.util.HashMap;
+import java.util.Map;
 import org.apache.poi.ss.util.CellRangeAddress;
 import org.apache.poi.xssf.streaming.SXSSFSheet;
 import org.apache.poi.xssf.usermodel.XSSFSheet;
@@ -17,6 +19,7 @@ final class Page {
 
   private final SXSSFSheet sheet;
   private final Styles styles;
+  private final Map<Integer, Double> heights = new HashMap<>();
 
   Page(SXSSFSheet sheet, Styles styles) {
     this.sheet = sheet;
@@ -26,7 +29,16 @@ final class Page {
 
   /** The next row to write to; rows count from 1 and are never gone back to. */
   Line line(int row) {
-    return new Line(sheet.createRow(row - 1), styles);
+    return new Line(sheet.createRow(row - 1), styles, height -> heights.put(row, height));
+  }
+
+  /** Height of some rows, points. */
+  double height(int first, int last) {
+    double height = 0.0;
+    for (int row = first; row <= last; row++) {
+      height += heights.getOrDefault(row, (double) ROW_HEIGHT);
+    }
+    return height;
   }
 
   /** Sets the width of a column in characters. */

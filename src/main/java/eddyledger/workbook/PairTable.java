@@ -2,12 +2,12 @@ package eddyledger.workbook;
 
 import eddyledger.ledger.Judgement;
 import eddyledger.ledger.LedgerRow;
+import eddyledger.workbook.Block.Pair;
 import eddyledger.workbook.Look.Format;
 import eddyledger.workbook.Look.Role;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
-import java.util.Optional;
 
 /** Writes levels and margins: a row for each receiver and condition. */
 final class PairTable {
@@ -81,7 +81,7 @@ final class PairTable {
             block.total().contributions(),
             block.total().lacking(),
             Results.nothing(total.status()));
-    line.formula(9, LedgerFormulas.statusOf(at), status, text.indented(1));
+    line.formula(9, JudgementFormulas.statusOf(at), status, text.indented(1));
     range(line, block);
     line.height(
         Heights.most(
@@ -90,10 +90,11 @@ final class PairTable {
 
   private void judgement(Line line, Block block) {
     Judgement judgement = block.total().row().judgement();
-    Optional<Integer> target = plan.targets().overall(block.pair());
+    TargetPlan targets = plan.targets();
+    Pair pair = block.pair();
     Look level = Look.of(Format.LEVEL);
     Look word = Look.of(Format.WORD);
-    if (target.isEmpty()) {
+    if (targets.overall(pair, TargetTable.TARGET).isEmpty()) {
       for (int column = TargetTable.TARGET; column <= TargetTable.ALLOWED; column++) {
         line.text(column, Answer.NOT_ASKED, word);
       }
@@ -104,7 +105,8 @@ final class PairTable {
     double[] asked = {judgement.target(), judgement.reserve(), judgement.allowance()};
     for (int i = 0; i < asked.length; i++) {
       int column = TargetTable.TARGET + i;
-      line.formula(column, Columns.cell(column, target.get()), Answer.number(asked[i]), level);
+      line.formula(
+          column, targets.overall(pair, column).orElseThrow(), Answer.number(asked[i]), level);
     }
     line.formula(
         TargetTable.MARGIN,
@@ -113,7 +115,7 @@ final class PairTable {
         Look.of(Format.MARGIN));
     line.formula(
         TargetTable.STATE,
-        Columns.cell(TargetTable.STATE, target.get()),
+        targets.overall(pair, TargetTable.STATE).orElseThrow(),
         Answer.state(judgement.state()),
         word);
   }

@@ -18,6 +18,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.function.Function;
+import java.util.regex.Pattern;
 
 /**
  * Writes the models and the flow as they were set: each value once for the place that sets it, with
@@ -33,6 +34,9 @@ final class SettingsTable {
           Field.text("Kind of value"),
           Field.text("Evidence grade"),
           Field.wide("Source and confidence", 4));
+
+  /** How a step's source says where its value is set, before it names the publication. */
+  private static final Pattern WHERE_SET = Pattern.compile("^(from|set on) [^;]*; ");
 
   private final Grid grid;
   private final WorkbookContent content;
@@ -182,6 +186,7 @@ final class SettingsTable {
       new TraceValues(content.traces().of(panel.id(), condition))
           .step("Gpp")
           .map(TraceStep::source)
+          .map(source -> WHERE_SET.matcher(source).replaceFirst(""))
           .ifPresent(source -> publications.put(model, source));
     }
   }

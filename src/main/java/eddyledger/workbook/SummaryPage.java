@@ -38,7 +38,7 @@ final class SummaryPage {
     new PairTable(page, plan).write();
     targets();
     new LargestTable(page, plan).write();
-    page.hide(TargetTable.LACKING, TargetTable.ENERGY);
+    page.hide(TargetTable.LACKING, TargetTable.KEY);
   }
 
   private void heading() {
@@ -99,7 +99,7 @@ final class SummaryPage {
             SummaryPlan.TIGHT_COLUMN,
             content.vehicle().tightBandOrDefault(),
             Look.of(Format.LEVEL, Role.INPUT))
-        .text(3, "A margin from zero to this is tight; below zero it is over.", words);
+        .text(3, "A margin from zero to this is tight; below zero it is over.", words.indented(1));
   }
 
   /** Writes heading, note and header of a table of this sheet that begins at a row. */

@@ -9,15 +9,16 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.stream.Collectors;
 
 /**
  * Where the targets stand: a row for each receiver, and one for what counts where there are several
  * receivers.
  *
  * @param lines the targets in the order of the file
- * @param overalls the row whose target a total is held against
+ * @param overalls the rows of the overall targets of a receiver in a condition
  */
-record TargetPlan(List<TargetLine> lines, Map<Pair, Integer> overalls) {
+record TargetPlan(List<TargetLine> lines, Map<Pair, List<Integer>> overalls) {
 
   /**
    * One target.
@@ -38,7 +39,7 @@ record TargetPlan(List<TargetLine> lines, Map<Pair, Integer> overalls) {
     Map<Pair, Block> byPair = new HashMap<>();
     blocks.forEach(block -> byPair.put(block.pair(), block));
     List<TargetLine> lines = new ArrayList<>();
-    Map<Pair, Integer> overalls = new HashMap<>();
+    Map<Pair, List<Integer>> overalls = new HashMap<>();
     int row = firstRow;
     for (Target target : content.vehicle().targets()) {
       TargetResult result = result(content, target);
@@ -47,7 +48,7 @@ record TargetPlan(List<TargetLine> lines, Map<Pair, Integer> overalls) {
         for (String receiver : target.receivers()) {
           Pair pair = new Pair(target.condition(), receiver);
           if (target.rating() == Rating.OVERALL_A) {
-            overalls.putIfAbsent(pair, row + at.size());
+            overalls.computeIfAbsent(pair, key -> new ArrayList<>()).add(row + at.size());
           }
           at.add(byPair.get(pair));
         }
@@ -66,9 +67,28 @@ record TargetPlan(List<TargetLine> lines, Map<Pair, Integer> overalls) {
         .orElse(null);
   }
 
-  /** Row of the target a total is held against; empty if there is none. */
-  Optional<Integer> overall(Pair pair) {
-    return Optional.ofNullable(overalls.get(pair));
+  /**
+   * The cell of the overall target that a total is held against, as a formula. Of several it is the
+   * one with the least margin, whatever their values are changed to.
+   *
+   * @return empty if there is none
+   */
+  Optional<String> overall(Pair pair, int column) {
+    List<Integer> rows = overalls.getOrDefault(pair, List.of());
+    if (rows.size() < 2) {
+      return rows.stream().findFirst().map(row -> TargetTable.outside(column, row));
+    }
+    String keys =
+        rows.stream()
+            .map(row -> TargetTable.outside(TargetTable.KEY, row))
+            .collect(Collectors.joining(",", "MIN(", ")"));
+    return Optional.of(
+        "INDEX(" + all(column) + ",MATCH(" + keys + "," + all(TargetTable.KEY) + ",0))");
+  }
+
+  private String all(int column) {
+    int first = lines.get(0).first();
+    return TargetTable.outside(column, first) + ":" + Columns.fixed(column, first + rows() - 1);
   }
 
   /** How many rows they take. */

@@ -3,6 +3,7 @@ package eddyledger.workbook;
 import eddyledger.ledger.LedgerRow;
 import eddyledger.ledger.Status;
 import eddyledger.model.PassRule;
+import eddyledger.model.Rating;
 import eddyledger.model.Target;
 import eddyledger.quantity.Decibels;
 import eddyledger.quantity.SpeechInterferenceLevel;
@@ -30,6 +31,9 @@ final class TargetTable {
 
   /** Mean square of the level over (20 µPa)². */
   static final int ENERGY = 17;
+
+  /** What puts overall targets in order: the one that allows least, then the least tolerance. */
+  static final int KEY = 18;
 
   private static final Look LEVELS = Look.of(Format.LEVEL);
 
@@ -104,11 +108,26 @@ final class TargetTable {
             + ",\"\")",
         unknown && Answer.level(level).isNumber() ? Answer.number(level) : Answer.words(""),
         helper);
+    if (target.rating() == Rating.OVERALL_A) {
+      key(line, target);
+    }
     line.formula(
         ENERGY,
         "IF(ISNUMBER(" + cell + "),10^(" + cell + "/10),0)",
         Answer.number(Answer.level(level).isNumber() ? Decibels.ratio(level) : 0.0),
         helper);
+  }
+
+  private static void key(Line line, Target target) {
+    int row = line.number();
+    line.formula(
+        KEY,
+        Columns.cell(ALLOWED, row)
+            + "+0.0001*"
+            + Columns.cell(TargetWords.TOLERANCE, row)
+            + "+0.000000001*ROW()",
+        Answer.number(target.allowed() + 1.0e-4 * target.rule().tolerance() + 1.0e-9 * row),
+        Look.of(Format.THREE));
   }
 
   /** Target, reserve and what is allowed; entered once, in the target's first row. */
@@ -168,7 +187,7 @@ final class TargetTable {
         "IF(ISNUMBER("
             + judged
             + "),"
-            + LedgerFormulas.state(left, lacks)
+            + JudgementFormulas.state(left, lacks)
             + ",IF(AND("
             + judged
             + "=\"none\","

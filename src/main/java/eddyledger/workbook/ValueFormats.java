@@ -1,17 +1,14 @@
 package eddyledger.workbook;
 
 import java.util.HexFormat;
-import java.util.List;
 import org.apache.poi.ss.usermodel.ConditionalFormattingThreshold.RangeType;
 import org.apache.poi.ss.util.CellRangeAddress;
+import org.apache.poi.xssf.model.StylesTable;
 import org.apache.poi.xssf.usermodel.XSSFConditionalFormattingRule;
 import org.apache.poi.xssf.usermodel.XSSFDataBarFormatting;
 import org.apache.poi.xssf.usermodel.XSSFSheet;
 import org.apache.poi.xssf.usermodel.XSSFSheetConditionalFormatting;
-import org.openxmlformats.schemas.spreadsheetml.x2006.main.CTCfRule;
-import org.openxmlformats.schemas.spreadsheetml.x2006.main.CTConditionalFormatting;
 import org.openxmlformats.schemas.spreadsheetml.x2006.main.CTDxf;
-import org.openxmlformats.schemas.spreadsheetml.x2006.main.STCfType;
 import org.openxmlformats.schemas.spreadsheetml.x2006.main.STPatternType;
 
 /** Formats that follow a cell's value: colours of states, bars, zeros without a sign. */
@@ -20,7 +17,6 @@ final class ValueFormats {
   private static final int UNSIGNED_ZERO = 300;
 
   private final XSSFSheet sheet;
-  private int priority = 1;
 
   ValueFormats(Page page) {
     sheet = page.frame();
@@ -29,10 +25,10 @@ final class ValueFormats {
   /** Colours the words of states, second to the words themselves. */
   ValueFormats states(int column, int first, int last) {
     String cell = Columns.cell(column, first);
-    String range = Columns.down(column, first, last);
-    rule(range, cell + "=\"over\"", words(Palette.OVER, Palette.OVER_FILL));
-    rule(range, cell + "=\"tight\"", words(Palette.TIGHT, Palette.TIGHT_FILL));
-    rule(range, cell + "=\"inside\"", words(Palette.INSIDE, null));
+    words(rule(first, last, column, column, cell + "=\"over\""), Palette.OVER, Palette.OVER_FILL);
+    words(
+        rule(first, last, column, column, cell + "=\"tight\""), Palette.TIGHT, Palette.TIGHT_FILL);
+    words(rule(first, last, column, column, cell + "=\"inside\""), Palette.INSIDE, null);
     return this;
   }
 
@@ -41,21 +37,23 @@ final class ValueFormats {
     String cell = Columns.cell(column, first);
     String formula =
         "OR(LEFT(" + cell + ",7)=\"partial\"," + cell + "=\"missing\"," + cell + "=\"failed\")";
-    rule(Columns.down(column, first, last), formula, words(Palette.OVER, null));
+    words(rule(first, last, column, column, formula), Palette.OVER, null);
     return this;
   }
 
   /** A difference or level that rounds to zero is shown without a sign. */
   ValueFormats noMinusZero(int firstColumn, int lastColumn, int first, int last) {
-    CTDxf format = CTDxf.Factory.newInstance();
+    String cell = Columns.cell(firstColumn, first);
+    CTDxf format =
+        rule(
+            first,
+            last,
+            firstColumn,
+            lastColumn,
+            "IF(ISNUMBER(" + cell + "),ABS(" + cell + ")<0.05,FALSE)");
     var number = format.addNewNumFmt();
     number.setNumFmtId(UNSIGNED_ZERO);
     number.setFormatCode("0.0;0.0;0.0");
-    String cell = Columns.cell(firstColumn, first);
-    rule(
-        cell + ":" + Columns.cell(lastColumn, last),
-        "IF(ISNUMBER(" + cell + "),ABS(" + cell + ")<0.05,FALSE)",
-        format);
     return this;
   }
 
@@ -71,12 +69,10 @@ final class ValueFormats {
     bar.getMaxThreshold().setRangeType(RangeType.NUMBER);
     bar.getMaxThreshold().setValue(1.0);
     formats.addConditionalFormatting(range, rule);
-    priority++;
     return this;
   }
 
-  private static CTDxf words(String ink, String fill) {
-    CTDxf format = CTDxf.Factory.newInstance();
+  private static void words(CTDxf format, String ink, String fill) {
     var font = format.addNewFont();
     font.addNewB().setVal(true);
     font.addNewColor().setRgb(opaque(ink));
@@ -85,22 +81,23 @@ final class ValueFormats {
       pattern.setPatternType(STPatternType.SOLID);
       pattern.addNewBgColor().setRgb(opaque(fill));
     }
-    return format;
   }
 
   private static byte[] opaque(String color) {
     return HexFormat.of().parseHex("FF" + color);
   }
 
-  private void rule(String range, String formula, CTDxf format) {
-    int id = sheet.getWorkbook().getStylesSource().putDxf(format) - 1;
-    CTConditionalFormatting formatting = sheet.getCTWorksheet().addNewConditionalFormatting();
-    formatting.setSqref(List.of(range));
-    CTCfRule rule = formatting.addNewCfRule();
-    rule.setType(STCfType.EXPRESSION);
-    rule.setPriority(priority);
-    rule.setDxfId(id);
-    rule.addFormula(formula);
-    priority++;
+  /** Adds a rule and gives its format, in which nothing is set yet. */
+  private CTDxf rule(int first, int last, int firstColumn, int lastColumn, String formula) {
+    XSSFSheetConditionalFormatting formats = sheet.getSheetConditionalFormatting();
+    XSSFConditionalFormattingRule rule = formats.createConditionalFormattingRule(formula);
+    // the library makes a format only together with a font, and writes its colours too short
+    rule.createFontFormatting();
+    StylesTable styles = sheet.getWorkbook().getStylesSource();
+    CTDxf format = styles.getDxfAt(styles._getDXfsSize() - 1);
+    format.unsetFont();
+    CellRangeAddress[] range = {new CellRangeAddress(first - 1, last - 1, firstColumn, lastColumn)};
+    formats.addConditionalFormatting(range, rule);
+    return format;
   }
 }

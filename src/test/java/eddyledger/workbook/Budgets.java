@@ -9,13 +9,17 @@ import eddyledger.ledger.RowKind;
 import eddyledger.ledger.Status;
 import eddyledger.ledger.Way;
 import eddyledger.model.BandTable;
+import eddyledger.model.Evidence;
 import eddyledger.model.Extras;
 import eddyledger.model.JudgedBands;
 import eddyledger.model.Node;
 import eddyledger.model.OperatingCondition;
 import eddyledger.model.OtherSource;
 import eddyledger.model.Panel;
+import eddyledger.model.PassRule;
+import eddyledger.model.Rating;
 import eddyledger.model.Section;
+import eddyledger.model.Target;
 import eddyledger.model.Vehicle;
 import eddyledger.quantity.BandSpectrum;
 import eddyledger.quantity.Bands;
@@ -25,6 +29,7 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.stream.Stream;
 
 /** Ledgers to make workbooks of. */
 final class Budgets {
@@ -79,11 +84,51 @@ final class Budgets {
                 .filter(source -> source.condition().equals(hold.id()))
                 .map(Budgets::spoilt)
                 .toList())
-        .targets(example.targets().stream().filter(it -> it.condition().equals(hold.id())).toList())
+        .targets(
+            Stream.concat(
+                    example.targets().stream().filter(it -> it.condition().equals(hold.id())),
+                    everyRating(hold.id()).stream())
+                .toList())
         .allowances(
             example.allowances().stream().filter(it -> it.condition().equals(hold.id())).toList())
         .tree(tree)
         .build();
+  }
+
+  /** The example with targets of every rating under every pass rule. */
+  static Vehicle judgedInEveryWay() {
+    Vehicle example = example();
+    List<Target> targets = new ArrayList<>(example.targets());
+    targets.addAll(everyRating("cruise"));
+    return example.edit().targets(targets).build();
+  }
+
+  private static List<Target> everyRating(String condition) {
+    List<Target> targets = new ArrayList<>();
+    for (Rating rating : Rating.values()) {
+      for (PassRule.Across across : PassRule.Across.values()) {
+        for (PassRule.Rounding rounding : PassRule.Rounding.values()) {
+          // some are missed, some held, some within their tolerance only
+          double value =
+              rating == Rating.OVERALL_LINEAR ? 82.8 : rating == Rating.OVERALL_A ? 74.9 : 63.0;
+          String id = "t" + targets.size();
+          PassRule rule = new PassRule(rounding, targets.size() % 3 == 0 ? 0.5 : 0.0, across);
+          targets.add(
+              new Target(
+                  id,
+                  id,
+                  condition,
+                  List.of("row-9", "row-2", "row-16"),
+                  rating,
+                  value,
+                  0.25,
+                  rule,
+                  Evidence.NONE,
+                  Extras.NONE));
+        }
+      }
+    }
+    return targets;
   }
 
   private static Node spoilt(Node node) {

@@ -145,6 +145,21 @@ class WorkbookRecalculationTest {
   }
 
   @Test
+  void everyRatingAndPassRuleIsLive() {
+    WorkbookContent judged = Budgets.content(Budgets.judgedInEveryWay());
+    Book book = assertStoredResultsAreRight(judged);
+    List<String> states = new ArrayList<>();
+    for (TargetPlan.TargetLine line : BookPlan.of(judged).targets().lines()) {
+      Row row = book.sheet("summary").getRow(line.first() - 1 + line.rows() - 1);
+      assertNear(Book.number(row, TargetTable.LEVEL), line.result().level(), line.target().id());
+      assertNear(Book.number(row, TargetTable.MARGIN), line.result().margin(), line.target().id());
+      states.add(Book.word(row, TargetTable.STATE));
+      assertThat(Book.word(row, TargetTable.STATE)).isEqualTo(line.result().state().text());
+    }
+    assertThat(states).hasSizeGreaterThan(30).contains("inside", "tight", "over");
+  }
+
+  @Test
   void totalsFollowTenChangedContributions() {
     long seed = 20261201L;
     Random random = new Random(seed);
