@@ -6,11 +6,9 @@ import eddyledger.app.ComputedLedger;
 import eddyledger.app.Edit;
 import eddyledger.app.ProjectState;
 import eddyledger.app.RecentFile;
-import eddyledger.app.Selection;
 import eddyledger.app.StateListener.Aspect;
 import eddyledger.chart.Palette;
 import eddyledger.present.StartPage;
-import eddyledger.present.TraceAccount;
 import eddyledger.present.WindowTitle;
 import java.awt.CardLayout;
 import java.nio.file.Files;
@@ -40,11 +38,11 @@ public final class Application {
   private final DeskParts desk;
   private final StartView start;
   private final TraceView trace;
+  private final TraceGuide guide;
   private final FileCommands files;
   private final Menus menus;
   private String page = START;
   private Path remembered;
-  private int followedBand = TraceAccount.FIRST_BAND;
 
   /**
    * Builds the window; {@link #show} shows it.
@@ -60,7 +58,7 @@ public final class Application {
     Dialogs dialogs = new Dialogs(frame);
     desk = new DeskParts(state, memory, this::showTrace);
     trace = new TraceView(() -> page(DESK));
-    trace.onBand(this::follow);
+    guide = new TraceGuide(state, trace);
     files = new FileCommands(state, services, dialogs, desk.statusView());
     start = new StartView(new StartActions(files, services.recent(), this::refreshStart));
     background =
@@ -184,34 +182,15 @@ public final class Application {
   }
 
   void showTrace() {
-    Selection at = state.selection();
-    followedBand =
-        state
-            .ledger()
-            .map(
-                ledger ->
-                    TraceAccount.loudestBand(ledger, at.rowId(), at.conditionId(), at.receiverId()))
-            .orElse(TraceAccount.FIRST_BAND);
+    guide.begin();
     page(TRACE);
     retrace();
     trace.requestFocusInWindow();
   }
 
-  private void follow(int band) {
-    followedBand = band;
-    retrace();
-  }
-
   private void retrace() {
-    if (page.equals(TRACE)) {
-      Selection at = state.selection();
-      state
-          .ledger()
-          .flatMap(
-              ledger ->
-                  TraceAccount.of(
-                      ledger, at.rowId(), at.conditionId(), at.receiverId(), followedBand))
-          .ifPresentOrElse(trace::show, () -> page(DESK));
+    if (page.equals(TRACE) && !guide.show()) {
+      page(DESK);
     }
   }
 

@@ -73,7 +73,13 @@ class DeskFlowTest {
     harness.press(KeyEvent.VK_S, KeyEvent.VK_CONTROL);
     harness.until("saved", () -> !harness.window.target().getTitle().contains("changed"));
     Vehicle saved = new ProjectReader().read(example).vehicle().orElseThrow();
-    double level = Ledger.of(saved).sheet("hold", "row-2").orElseThrow().row(PANEL, Way.ALL).orElseThrow().levelA();
+    double level =
+        Ledger.of(saved)
+            .sheet("hold", "row-2")
+            .orElseThrow()
+            .row(PANEL, Way.ALL)
+            .orElseThrow()
+            .levelA();
     assertThat(after).contains(String.format("%.1f", level));
 
     harness.press(KeyEvent.VK_W, KeyEvent.VK_CONTROL);
