@@ -13,6 +13,8 @@ import javax.swing.JButton;
 final class LinkButton extends JButton {
   private static final int GAP = 3;
 
+  private String[] texts = {};
+
   LinkButton(Icon icon, String text) {
     super(text, icon);
     setFont(Theme.small());
@@ -23,6 +25,33 @@ final class LinkButton extends JButton {
     setContentAreaFilled(false);
     setFocusPainted(false);
     setRolloverEnabled(true);
+  }
+
+  /** Shows the first text that fits its width; the last one if none does. */
+  void texts(String... longestFirst) {
+    texts = longestFirst.clone();
+    fit(getWidth());
+  }
+
+  private void fit(int width) {
+    double left = getIcon() == null ? 0.0 : getIcon().getIconWidth() + GAP;
+    String fitting = texts[texts.length - 1];
+    for (int i = texts.length - 1; i >= 0; i--) {
+      if (width <= 0 || left + Digits.width(getFont(), texts[i]) <= width) {
+        fitting = texts[i];
+      }
+    }
+    if (!fitting.equals(getText())) {
+      setText(fitting);
+    }
+  }
+
+  @Override
+  public void setBounds(int x, int y, int width, int height) {
+    super.setBounds(x, y, width, height);
+    if (texts.length > 0) {
+      fit(width);
+    }
   }
 
   @Override

@@ -36,7 +36,7 @@ final class SheetRowView extends JPanel {
   private final JLabel label = new JLabel();
   private final JLabel unit = new JLabel();
   private final JLabel origin = new JLabel();
-  private final JButton back = new LinkButton(new BackIcon(), "");
+  private final LinkButton back = new LinkButton(new BackIcon(), "");
   private final JButton link = new LinkButton(null, "");
   private final WrapText message = new WrapText(MESSAGE_WIDTH);
   private SheetField shown;
@@ -150,8 +150,7 @@ final class SheetRowView extends JPanel {
     origin.setForeground(fresh ? palette.stateText(state) : ink);
     origin.setFont(fresh ? Theme.strong(12) : Theme.small());
     back.setVisible(way);
-    boolean narrow = wide(field) || field.kind() == Kind.CHOICE && !fits(field);
-    back.setText(narrow ? "back" : special ? field.origin() : field.back());
+    back.texts(special ? field.origin() : field.back(), "back");
     back.setForeground(palette.ink2());
     back.setToolTipText(SheetInput.tip(field.origin() + "; " + field.back()));
     Theme.named(back, "sheet." + field.key() + ".back", field.spoken() + ": " + field.back());

@@ -50,6 +50,7 @@ public final class SheetSample {
       sample.draw("panel-" + palette, 760, it -> it.select("crown-a"));
       sample.draw("whole-" + palette, 1080, it -> it.select("crown-a"));
       sample.draw("own-" + palette, 1120, SheetSample::own);
+      sample.draw("small-" + palette, 330, 630, SheetSample::own);
       sample.draw("bands-" + palette, 760, SheetSample::bands);
       sample.draw("faults-" + palette, 900, SheetSample::faults);
       sample.draw("section-" + palette, 560, it -> it.select("station-a"));
@@ -122,6 +123,11 @@ public final class SheetSample {
   }
 
   private void draw(String name, int height, Consumer<SheetSample> before) throws Exception {
+    draw(name, 348, height, before);
+  }
+
+  private void draw(String name, int width, int height, Consumer<SheetSample> before)
+      throws Exception {
     JFrame[] frame = new JFrame[1];
     SwingUtilities.invokeAndWait(
         () -> {
@@ -133,13 +139,13 @@ public final class SheetSample {
           frame[0].setUndecorated(true);
           frame[0].getRootPane().setWindowDecorationStyle(javax.swing.JRootPane.NONE);
           frame[0].getContentPane().add(new SheetView(presenter, () -> {}));
-          frame[0].setSize(348, height);
+          frame[0].setSize(width, height);
           frame[0].setVisible(true);
         });
     Thread.sleep(SETTLE_MS);
     SwingUtilities.invokeAndWait(
         () -> {
-          BufferedImage image = new BufferedImage(348, height, BufferedImage.TYPE_INT_RGB);
+          BufferedImage image = new BufferedImage(width, height, BufferedImage.TYPE_INT_RGB);
           Graphics2D g = image.createGraphics();
           frame[0].getContentPane().printAll(g);
           g.dispose();
