@@ -47,7 +47,7 @@ final class WorkbookCommand implements Callable<Integer> {
     printer.println(
         "Sheets: summary, ledger (receivers and conditions: "
             + session.ledger().sheets().size()
-            + "), other sources, assumptions, revision.");
+            + "), other sources, assumptions, panels, flow, revision.");
     printer.println(FindingsText.count(session.findings()) + "; they stand under assumptions.");
     Cautions.SHORT.forEach(printer::println);
     return project.failOn.exitCode(session.ledger(), session.findings());

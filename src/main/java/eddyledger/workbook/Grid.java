@@ -10,7 +10,7 @@ final class Grid {
   /** The last column. */
   static final int LAST = 13;
 
-  private static final double[] WIDTHS = {30, 36, 24, 12, 12, 12, 12, 12, 12, 12, 12, 12, 14, 78};
+  private static final double[] WIDTHS = {30, 36, 24, 12, 12, 12, 12, 12, 12, 12, 12, 12, 14, 86};
 
   private final Page page;
   private int row = 1;
@@ -75,7 +75,8 @@ final class Grid {
 
   /** Header of a table. */
   void header(List<Field> fields) {
-    Line line = page.line(next()).height(26);
+    int at = next();
+    Line line = page.line(at).height(36);
     int column = 0;
     int after = 0;
     for (Field field : fields) {
@@ -85,6 +86,9 @@ final class Grid {
       after = words ? 0 : 1;
       line.blanks(column + 1, column + field.span() - 1, look);
       line.text(column, field.header(), look);
+      if (field.span() > 1) {
+        page.merge(at, column, column + field.span() - 1);
+      }
       column += field.span();
     }
   }

@@ -15,7 +15,7 @@ final class Heights {
     long lines = 0;
     for (String part : text.split("\n", -1)) {
       // a column is measured in digits, which are wider than letters; words do not fill their lines
-      lines += (long) Math.max(1.0, Math.ceil(part.length() / (1.06 * characters)));
+      lines += (long) Math.max(1.0, Math.ceil(part.length() / (1.15 * characters)));
     }
     return Math.min(MOST, lines * LINE + PADDING);
   }

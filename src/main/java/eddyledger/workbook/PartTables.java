@@ -185,6 +185,7 @@ final class PartTables {
   }
 
   private static String evidence(Evidence evidence) {
-    return Words.grade(evidence) + "; " + Words.source(evidence);
+    String grade = Words.grade(evidence);
+    return grade.equals(Words.source(evidence)) ? grade : grade + "; " + Words.source(evidence);
   }
 }

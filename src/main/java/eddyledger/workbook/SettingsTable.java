@@ -124,7 +124,7 @@ final class SettingsTable {
         .ifPresent(
             held ->
                 add(
-                    "damping loss factor, without radiation",
+                    "damping loss factor",
                     Words.table(held.value().best(), ""),
                     held,
                     held.value().evidence(),

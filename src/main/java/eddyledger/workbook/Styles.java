@@ -63,7 +63,7 @@ final class Styles {
 
   private static HorizontalAlignment alignment(Look look) {
     return switch (look.format()) {
-      case TEXT, WRAPPED -> HorizontalAlignment.LEFT;
+      case TEXT, WRAPPED, INSTANT -> HorizontalAlignment.LEFT;
       case WORD, COUNT -> HorizontalAlignment.CENTER;
       default ->
           look.emphasis() == Emphasis.HEADER
