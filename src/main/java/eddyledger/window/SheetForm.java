@@ -43,6 +43,7 @@ final class SheetForm extends JPanel implements Scrollable {
         }
       };
   private final List<String> wanted = new ArrayList<>();
+  private String row = "";
 
   SheetForm(SheetPresenter presenter, JComponent traceButton) {
     super(
@@ -56,6 +57,12 @@ final class SheetForm extends JPanel implements Scrollable {
   void show(SheetText text) {
     Palette palette = Theme.palette();
     setBackground(palette.paper());
+    if (!text.row().equals(row)) {
+      // groups of another row may stand in another order
+      row = text.row();
+      lines.clear();
+      removeAll();
+    }
     wanted.clear();
     label("title", text.title(), Theme.strong(15), palette.ink(), "wmin 0, h 22!");
     label("trail", text.trail(), Theme.small(), palette.ink2(), "wmin 0, h 16!, gapbottom 2");

@@ -84,6 +84,7 @@ class DeskFlowTest {
 
     harness.press(KeyEvent.VK_W, KeyEvent.VK_CONTROL);
     harness.openByDialog(example);
+    harness.clickTile("tile-hold-row-2");
     harness.clickRow(PANEL);
     assertThat(harness.row(PANEL)).isEqualTo(after);
 

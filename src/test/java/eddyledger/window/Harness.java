@@ -272,6 +272,12 @@ final class Harness implements AutoCloseable {
     robot.waitForIdle();
   }
 
+  /** Clicks a tile of the target strip. */
+  void clickTile(String name) {
+    robot.click(robot.finder().findByName(window.target(), name, TargetTileView.class, true));
+    robot.waitForIdle();
+  }
+
   /** What the selected tile of the target strip says. */
   String selectedTile() {
     return GuiActionRunner.execute(
