@@ -53,7 +53,11 @@ class ArchitectureTest {
           new Layer("bridge"),
           new Layer("file", JACKSON),
           new Layer(
-              "workbook", "org.apache.poi..", "org.openxmlformats..", "org.apache.xmlbeans.."),
+              "workbook",
+              "org.apache.poi..",
+              "org.openxmlformats..",
+              "org.apache.xmlbeans..",
+              "org.apache.commons.compress.."),
           new Layer("chart", "org.jfree..", "java.awt..", "javax.swing..", ACCESSIBILITY),
           new Layer("app"),
           new Layer("command", PICOCLI),

@@ -17,6 +17,7 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
 
 /** What the README shows is what the program prints, and the files it names are there. */
 class ReadmeTest {
@@ -60,24 +61,43 @@ class ReadmeTest {
   }
 
   @Test
-  void theCommandsShownRun() throws IOException {
+  void theCommandsShownRun(@TempDir Path folder) throws IOException {
     List<String> commands =
         shown().stream()
             .filter(line -> line.startsWith("java -jar target/eddyledger.jar"))
             .toList();
-    assertThat(commands).hasSize(3);
+    assertThat(commands).hasSize(5);
     for (String command : commands) {
-      List<String> words = Arrays.asList(command.trim().split("\\s+"));
-      int csv = words.indexOf("--csv");
-      List<String> arguments = words.subList(3, csv < 0 ? words.size() : csv);
+      List<String> words = new ArrayList<>(Arrays.asList(command.trim().split("\\s+")));
+      List<String> arguments = words.subList(3, words.size());
+      if (arguments.get(0).equals("window")) {
+        // the tests of the window open it; here there is no display
+        assertThat(Path.of(arguments.get(1))).exists();
+        continue;
+      }
+      arguments.replaceAll(
+          word ->
+              word.endsWith(".csv") || word.endsWith(".xlsx")
+                  ? folder.resolve(word).toString()
+                  : word);
       assertThat(printed(arguments.toArray(String[]::new))).isNotBlank();
     }
+    assertThat(folder)
+        .isDirectoryContaining("glob:**.csv")
+        .isDirectoryContaining("glob:**/budget.xlsx");
   }
 
   @Test
   void theFilesNamedAreThere() {
     List<String> names =
-        List.of("DEVELOPERS.md", "templates/eddyledger.schema.json", "installer/build-image");
+        List.of(
+            "DEVELOPERS.md",
+            "templates/eddyledger.schema.json",
+            "installer/build-image",
+            "src/docs/make-pictures",
+            "src/docs/pictures/desk-light.png",
+            "src/docs/pictures/desk-dark.png",
+            "src/docs/pictures/workbook.png");
     assertThat(names)
         .allSatisfy(
             name -> {

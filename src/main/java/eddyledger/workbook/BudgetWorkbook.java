@@ -3,6 +3,7 @@ package eddyledger.workbook;
 import eddyledger.quantity.Progress;
 import java.io.ByteArrayOutputStream;
 import java.io.IOException;
+import org.apache.commons.compress.archivers.zip.Zip64Mode;
 import org.apache.poi.ss.usermodel.Name;
 import org.apache.poi.ss.usermodel.Sheet;
 import org.apache.poi.xssf.streaming.SXSSFSheet;
@@ -31,6 +32,8 @@ public final class BudgetWorkbook {
    */
   public static byte[] of(WorkbookContent content, Progress progress) throws IOException {
     try (SXSSFWorkbook workbook = new SXSSFWorkbook(new XSSFWorkbook(), WINDOW)) {
+      // entries marked as over 4 GB without need are refused by plain readers of archives
+      workbook.setZip64Mode(Zip64Mode.AsNeeded);
       try {
         new BookWriter(workbook, content).write(progress);
         progress.check();

@@ -36,6 +36,7 @@ final class Screens {
       Path example = Harness.example(copies);
       save(harness, folder.resolve("start-" + end));
       harness.openByDialog(example);
+      harness.clickTile("tile-cruise-row-2");
       harness.select("upper-side-left-a");
       save(harness, folder.resolve("desk-" + end));
       harness.press(KeyEvent.VK_P, KeyEvent.VK_CONTROL);

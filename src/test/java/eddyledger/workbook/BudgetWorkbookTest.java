@@ -21,6 +21,8 @@ import java.util.concurrent.CancellationException;
 import java.util.regex.Pattern;
 import java.util.stream.Collectors;
 import java.util.stream.IntStream;
+import java.util.zip.ZipEntry;
+import java.util.zip.ZipInputStream;
 import org.apache.poi.openxml4j.exceptions.InvalidFormatException;
 import org.apache.poi.openxml4j.opc.OPCPackage;
 import org.apache.poi.openxml4j.opc.PackagePart;
@@ -54,6 +56,19 @@ class BudgetWorkbookTest {
       row.forEach(cell -> texts.add(Book.shown(cell).toString()));
     }
     return texts;
+  }
+
+  @Test
+  void aPlainReaderOfArchivesCanReadIt() throws IOException {
+    List<String> entries = new ArrayList<>();
+    byte[] bytes = BudgetWorkbook.of(faultyContent, Progress.NONE);
+    try (ZipInputStream zip = new ZipInputStream(new ByteArrayInputStream(bytes))) {
+      for (ZipEntry entry = zip.getNextEntry(); entry != null; entry = zip.getNextEntry()) {
+        entries.add(entry.getName());
+        zip.readAllBytes();
+      }
+    }
+    assertThat(entries).contains("xl/workbook.xml", "xl/worksheets/sheet1.xml");
   }
 
   @Test
