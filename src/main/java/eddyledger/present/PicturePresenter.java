@@ -4,6 +4,7 @@ import eddyledger.app.ProjectState;
 import eddyledger.app.StateListener.Aspect;
 import eddyledger.chart.Picture;
 import eddyledger.ledger.ReceiverSheet;
+import eddyledger.model.TreePath;
 import java.util.Optional;
 
 /** Which picture of the selection is shown, and what stands over it. */
@@ -69,6 +70,9 @@ public final class PicturePresenter {
 
   /** Why there is no picture. */
   public String absence() {
+    if (state.open() && TreePath.of(state.vehicle()).isEmpty()) {
+      return "No panel yet: Vehicle, Add panel (Ctrl+Shift+P) makes the first";
+    }
     return state.open() && state.unusable()
         ? "No level yet: the findings say what is missing"
         : "No level yet";

@@ -18,7 +18,8 @@ public final class StatusPresenter {
 
   /** Notes how far the computation is. */
   public void computing(int steps, int of) {
-    work = of > 0 ? "Computing, " + steps + " of " + of + " panels" : "Computing";
+    // of what is counted only the different ones are computed, so the share says more than numbers
+    work = of > 0 ? "Computing, " + 100 * steps / of + " %" : "Computing";
   }
 
   /** Notes other work that is going on; empty when it has ended. */

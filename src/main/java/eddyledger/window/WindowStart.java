@@ -5,10 +5,15 @@ import java.awt.GraphicsEnvironment;
 import java.nio.file.Path;
 import java.util.concurrent.CountDownLatch;
 import java.util.function.Supplier;
+import java.util.logging.Level;
+import java.util.logging.Logger;
 import javax.swing.SwingUtilities;
 
 /** Opens the window on the event thread and waits for its end. */
 public final class WindowStart implements WindowStarter {
+  /** Held, else its level is forgotten: that a folder for settings was made is nobody's news. */
+  private static final Logger SETTINGS_LOG = Logger.getLogger("java.util.prefs");
+
   private final Supplier<Services> services;
 
   /**
@@ -26,6 +31,7 @@ public final class WindowStart implements WindowStarter {
 
   @Override
   public void open(Path file) {
+    SETTINGS_LOG.setLevel(Level.WARNING);
     // smooth text where the desktop does not ask for it
     if (System.getProperty("awt.useSystemAAFontSettings") == null) {
       System.setProperty("awt.useSystemAAFontSettings", "on");
