@@ -25,7 +25,7 @@ final class SheetRowView extends JPanel {
   private static final int LONGEST_NUMBER = 12;
   private static final String ORIGIN = ", wmin 0, growx";
   private static final String BACK = ", wmin 0, growx, h 20!";
-  private static final int CHOICE = 118;
+  private static final int CHOICE = 120;
   private static final int WIDE_CHOICE = 156;
   private static final int ROOM_FOR_ARROW = 25;
 
@@ -48,7 +48,7 @@ final class SheetRowView extends JPanel {
     layout =
         new MigLayout(
             "insets 0, gap 0, hidemode 3, novisualpadding",
-            "[98!][78!]6[34!]3[grow,fill]",
+            "[98!][78!]6[35!]5[grow,fill]",
             "[22::,center][]0[]");
     setLayout(layout);
     setOpaque(false);
