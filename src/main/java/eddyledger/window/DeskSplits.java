@@ -15,7 +15,7 @@ import javax.swing.JSplitPane;
 final class DeskSplits extends JPanel {
   private static final long serialVersionUID = 1L;
   private static final int DIVIDER = 7;
-  private static final int LEAST_SHEET = 336;
+  private static final int LEAST_SHEET = 344;
   private static final int SHEET = 348;
   private static final int MOST_SHEET = 420;
   private static final int USUAL_WIDTH = 1440;

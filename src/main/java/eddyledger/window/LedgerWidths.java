@@ -19,8 +19,10 @@ import javax.swing.table.TableColumnModel;
  * sections are closed.
  */
 final class LedgerWidths {
-  private static final int LEAST_TEXT = 214;
+  private static final int MOST_SUPPLIER = 150;
+  private static final double FIRST_PART = 0.63;
   private static final int MOST_TEXT = 340;
+  private static final int MOST_NAME = 380;
 
   private final JTable table;
   private final Lettering lettering = new Lettering();
@@ -82,11 +84,12 @@ final class LedgerWidths {
       widths[column.ordinal()] = LedgerCells.least(column);
       left -= LedgerCells.least(column);
     }
-    for (int most : new int[] {LEAST_TEXT, MOST_TEXT}) {
+    for (double part : new double[] {FIRST_PART, 1.0}) {
       for (LedgerColumn column :
-          List.of(LedgerColumn.SUPPLIER, LedgerColumn.NAME, LedgerColumn.LAY_UP)) {
-        int wanted = (int) Math.ceil(asked.getOrDefault(column, 0.0));
-        left -= grow(widths, column, Math.min(most, wanted), left);
+          List.of(LedgerColumn.NAME, LedgerColumn.SUPPLIER, LedgerColumn.LAY_UP)) {
+        double most = part * (column == LedgerColumn.SUPPLIER ? MOST_SUPPLIER : MOST_TEXT);
+        double wanted = Math.min(most, asked.getOrDefault(column, 0.0));
+        left -= grow(widths, column, (int) Math.ceil(wanted), left);
       }
     }
     for (LedgerColumn column : LedgerColumn.values()) {
@@ -100,7 +103,9 @@ final class LedgerWidths {
     widths[LedgerColumn.BANDS.ordinal()] += each * Bands.COUNT;
     left -= each * Bands.COUNT;
     left -= grow(widths, LedgerColumn.LAY_UP, MOST_TEXT, left);
-    widths[LedgerColumn.NAME.ordinal()] += Math.max(0, left);
+    left -= grow(widths, LedgerColumn.NAME, MOST_NAME, left);
+    // what is left stands at the end, so that a name is not far from its numbers
+    widths[LedgerColumn.SUPPLIER.ordinal()] += Math.max(0, left);
     for (int i = 0; i < widths.length; i++) {
       TableColumn column = model.getColumn(table.convertColumnIndexToView(i));
       if (column.getPreferredWidth() != widths[i]) {

@@ -2,25 +2,19 @@ package eddyledger.window;
 
 import eddyledger.present.SheetPresenter;
 import java.awt.BorderLayout;
-import java.awt.Color;
 import java.awt.Dimension;
-import java.awt.GradientPaint;
-import java.awt.Graphics;
-import java.awt.Graphics2D;
 import java.awt.Rectangle;
 import javax.swing.BorderFactory;
 import javax.swing.JButton;
 import javax.swing.JComponent;
 import javax.swing.JPanel;
 import javax.swing.JScrollPane;
-import javax.swing.JViewport;
 import javax.swing.SwingUtilities;
 
 /** The sheet: the form of the selected row, at the right of the desk. */
 public final class SheetView extends JPanel {
   private static final int WIDTH = 348;
   private static final int LEAST = 300;
-  private static final int FADE = 24;
   private static final int LINES_AROUND = 30;
 
   private final SheetPresenter presenter;
@@ -44,11 +38,8 @@ public final class SheetView extends JPanel {
         new JScrollPane(
             form, JScrollPane.VERTICAL_SCROLLBAR_ALWAYS, JScrollPane.HORIZONTAL_SCROLLBAR_NEVER);
     scroll.setBorder(BorderFactory.createEmptyBorder());
-    // the soft edge stays where it is while the lines move
-    scroll.getViewport().setScrollMode(JViewport.SIMPLE_SCROLL_MODE);
-    scroll.getViewport().addChangeListener(event -> repaint());
     scroll.getVerticalScrollBar().setUnitIncrement(22);
-    add(scroll);
+    add(new SoftEdge(scroll));
     Theme.named(this, "sheet", "Sheet of the selected row");
     presenter.listen(this::refresh);
     refresh();
@@ -88,21 +79,6 @@ public final class SheetView extends JPanel {
     component.scrollRectToVisible(
         new Rectangle(
             0, -LINES_AROUND, component.getWidth(), component.getHeight() + 2 * LINES_AROUND));
-  }
-
-  /** A soft edge where the sheet goes on below. */
-  @Override
-  protected void paintChildren(Graphics graphics) {
-    super.paintChildren(graphics);
-    Rectangle view = ((JViewport) form.getParent()).getViewRect();
-    if (view.y + view.height < form.getHeight()) {
-      Graphics2D g = (Graphics2D) graphics;
-      Color paper = Theme.palette().paper();
-      Color clear = new Color(paper.getRGB() & 0xFFFFFF, true);
-      int top = view.height - FADE;
-      g.setPaint(new GradientPaint(0, top, clear, 0, view.height, paper));
-      g.fillRect(0, top, view.width, FADE);
-    }
   }
 
   @Override

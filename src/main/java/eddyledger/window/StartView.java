@@ -103,7 +103,7 @@ public final class StartView extends JPanel {
     caution.setLineWrap(true);
     caution.setWrapStyleWord(true);
     caution.setOpaque(false);
-    caution.setBorder(null);
+    caution.setBorder(BorderFactory.createEmptyBorder());
     Theme.named(caution, "start.caution", StartPage.caution());
     JPanel inner =
         new JPanel(

@@ -92,6 +92,8 @@ public final class Theme {
     put("ToggleButton.tab.focusBackground", palette.selection());
     put("ToggleButton.selectedBackground", palette.selection());
     put("ToggleButton.selectedForeground", palette.ink());
+    put("RootPane.activeBorderColor", palette.ink3());
+    put("RootPane.inactiveBorderColor", palette.hairline());
     put("ToolTip.background", palette.field());
     put("ToolTip.foreground", palette.ink());
   }
