@@ -64,6 +64,6 @@ final class FindingPlaces {
         finding.severity() == Severity.NOTE || finding.remedy().isEmpty()
             ? ""
             : " " + finding.remedy();
-    return new SheetMessage(finding.severity(), finding.what() + remedy);
+    return new SheetMessage(finding.severity(), Readable.sentence(finding.what() + remedy));
   }
 }

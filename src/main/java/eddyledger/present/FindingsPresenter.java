@@ -40,17 +40,19 @@ public final class FindingsPresenter {
     return new Line(
         finding.severity().text(),
         name.isEmpty() ? finding.where() : name,
-        finding.what(),
-        finding.remedy());
+        words(finding.what()),
+        words(finding.remedy()));
+  }
+
+  private String words(String text) {
+    return state.open() ? FindingWords.sentence(state.vehicle(), text) : Readable.sentence(text);
   }
 
   private String rowName(Finding finding) {
     if (!state.open() || finding.subject().isEmpty()) {
       return "";
     }
-    return TreeEdit.find(state.vehicle(), finding.subject())
-        .map(path -> path.node().name())
-        .orElse("");
+    return FindingWords.name(state.vehicle(), finding.subject());
   }
 
   /** How many there are and whether one stops a level, for the status line. */

@@ -13,6 +13,8 @@ final class Reasons {
   /** What the row itself says already. */
   private static final String SUBJECT = "^The panel has ";
 
+  private static final String CONDITION = " in condition \"[^\"]*\"";
+
   private Reasons() {}
 
   /** What stands in a row in place of its spectrum: the reason without the place in the file. */
@@ -30,6 +32,8 @@ final class Reasons {
       };
     }
     String text = PLACE.matcher(row.reason()).replaceFirst("").replaceFirst(SUBJECT, "");
+    // the heading of the ledger names the condition
+    text = text.replaceFirst(CONDITION, "");
     String plain = text.endsWith(".") ? text.substring(0, text.length() - 1) : text;
     return plain.isEmpty() ? "no sound" : plain;
   }

@@ -2,6 +2,7 @@ package eddyledger.present;
 
 import eddyledger.check.Finding;
 import eddyledger.check.Severity;
+import eddyledger.model.OperatingCondition;
 import java.util.ArrayList;
 import java.util.List;
 
@@ -38,6 +39,7 @@ record SheetTexts(SheetContext context, List<Finding> findings, SheetStay stay) 
     findings.stream()
         .filter(finding -> finding.severity().atLeast(Severity.WARNING))
         .filter(finding -> FindingPlaces.meets(finding, places, condition))
+        .filter(this::ofThisCondition)
         .forEach(finding -> field.message(FindingPlaces.message(finding)));
     stay.typed(entry.key()).ifPresent(field::text);
     stay.refusal(entry.key()).ifPresent(words -> field.message(SheetMessage.error(words)));
@@ -50,14 +52,16 @@ record SheetTexts(SheetContext context, List<Finding> findings, SheetStay stay) 
         .filter(finding -> !place.isEmpty() && finding.place().equals(place))
         .filter(finding -> finding.severity().atLeast(Severity.WARNING))
         .filter(this::ofThisCondition)
-        .map(FindingPlaces::message)
+        .map(finding -> FindingPlaces.message(finding))
         .toList();
   }
 
-  /** What the computation says of a row begins with the condition it met it in. */
+  /** What is said of one condition is said in that condition only. */
   private boolean ofThisCondition(Finding finding) {
-    String start = "In condition \"";
-    return !finding.what().startsWith(start)
-        || finding.what().startsWith(start + context.selection().conditionId() + "\"");
+    String what = finding.what();
+    return context.vehicle().conditions().stream()
+        .map(OperatingCondition::id)
+        .filter(id -> !id.equals(context.selection().conditionId()))
+        .noneMatch(id -> what.contains("n condition \"" + id + "\""));
   }
 }

@@ -2,11 +2,9 @@ package eddyledger.window;
 
 import java.awt.BorderLayout;
 import java.awt.Dimension;
-import javax.swing.BorderFactory;
 import javax.swing.InputMap;
 import javax.swing.JComponent;
 import javax.swing.JPanel;
-import javax.swing.JSplitPane;
 import javax.swing.KeyStroke;
 
 /**
@@ -15,9 +13,9 @@ import javax.swing.KeyStroke;
  */
 final class DeskView extends JPanel {
   private static final long serialVersionUID = 1L;
-  private static final int SHEET_WIDTH = 348;
-  private static final double LEDGER_SHARE = 0.62;
-  private static final int FINDINGS_HEIGHT = 150;
+  private static final int LOW = 800;
+  private static final int FEW_FINDINGS = 3;
+  private static final int MORE_FINDINGS = 5;
 
   /** The regions below the target strip. */
   enum Region {
@@ -30,12 +28,8 @@ final class DeskView extends JPanel {
   private final JComponent picture;
   private final JComponent sheet;
   private final JComponent findings;
-  private final transient WindowMemory memory;
-  private final JPanel centre = new JPanel(new BorderLayout());
-  private final JSplitPane upright = split(JSplitPane.VERTICAL_SPLIT);
-  private final JSplitPane across = split(JSplitPane.HORIZONTAL_SPLIT);
+  private final DeskSplits centre;
   private Region whole;
-  private boolean placed;
 
   DeskView(
       JComponent strip,
@@ -49,26 +43,12 @@ final class DeskView extends JPanel {
     this.picture = picture;
     this.sheet = sheet;
     this.findings = findings;
-    this.memory = memory;
-    upright.setResizeWeight(LEDGER_SHARE);
-    across.setResizeWeight(1.0);
-    for (JComponent part : new JComponent[] {ledger, picture, sheet}) {
-      part.setMinimumSize(new Dimension(120, 80));
-    }
-    findings.setPreferredSize(new Dimension(100, FINDINGS_HEIGHT));
+    centre = new DeskSplits(memory);
     findings.setVisible(false);
     add(strip, BorderLayout.NORTH);
     add(centre, BorderLayout.CENTER);
     add(findings, BorderLayout.SOUTH);
-    together();
-  }
-
-  private static JSplitPane split(int orientation) {
-    JSplitPane split = new JSplitPane(orientation);
-    split.setBorder(BorderFactory.createEmptyBorder());
-    split.setContinuousLayout(true);
-    release(split, "F6", "F8", "shift F8");
-    return split;
+    centre.together(ledger, picture, sheet);
   }
 
   /** Takes keys away that a standard component keeps for itself. */
@@ -79,45 +59,21 @@ final class DeskView extends JPanel {
     }
   }
 
-  private void together() {
-    centre.removeAll();
-    upright.setTopComponent(ledger);
-    upright.setBottomComponent(picture);
-    across.setLeftComponent(upright);
-    across.setRightComponent(sheet);
-    centre.add(across, BorderLayout.CENTER);
-    placed = false;
-    centre.revalidate();
-    centre.repaint();
-  }
-
   @Override
   public void doLayout() {
+    int rows = getHeight() < LOW ? FEW_FINDINGS : MORE_FINDINGS;
+    findings.setPreferredSize(new Dimension(100, FindingsView.height(rows)));
     super.doLayout();
-    if (!placed && whole == null && getHeight() > 0 && centre.getHeight() > 0) {
-      placed = true;
-      centre.doLayout();
-      int width = memory.sheetWidth(SHEET_WIDTH);
-      across.setDividerLocation(Math.max(200, across.getWidth() - width - 7));
-      across.doLayout();
-      upright.setDividerLocation((int) (memory.ledgerShare(LEDGER_SHARE) * upright.getHeight()));
-    }
   }
 
   /** Gives the whole desk to a region, or gives it back if the region has it. */
   void toggleWhole(Region region) {
-    if (whole == null) {
-      remember();
-    }
     if (whole == region) {
       whole = null;
-      together();
+      centre.together(ledger, picture, sheet);
     } else {
       whole = region;
-      centre.removeAll();
-      centre.add(part(region), BorderLayout.CENTER);
-      centre.revalidate();
-      centre.repaint();
+      centre.alone(part(region));
     }
     part(region).requestFocusInWindow();
   }
@@ -148,9 +104,6 @@ final class DeskView extends JPanel {
 
   /** Keeps where the splits stand. */
   void remember() {
-    if (placed && whole == null && across.getWidth() > 0 && upright.getHeight() > 0) {
-      memory.keepSheetWidth(across.getWidth() - across.getDividerLocation() - 7);
-      memory.keepLedgerShare((double) upright.getDividerLocation() / upright.getHeight());
-    }
+    centre.remember();
   }
 }

@@ -25,12 +25,14 @@ import net.miginfocom.swing.MigLayout;
 /** The list of findings; Enter or a click goes to the row and field a finding is about. */
 final class FindingsView extends JPanel {
   private static final long serialVersionUID = 1L;
+  private static final int HEAD = 30;
+  private static final int ROW = 37;
 
   private final transient FindingsPresenter presenter;
   private final transient Consumer<Finding> go;
   private final DefaultListModel<Finding> model = new DefaultListModel<>();
   private final JList<Finding> list =
-      Theme.named(new JList<>(model), "findings.list", "Findings, the gravest first");
+      Theme.named(new Findings(model), "findings.list", "Findings, the gravest first");
   private final JLabel heading = new JLabel("Findings");
 
   FindingsView(FindingsPresenter presenter, Consumer<Finding> go, Runnable close) {
@@ -38,6 +40,7 @@ final class FindingsView extends JPanel {
     this.presenter = presenter;
     this.go = go;
     list.setCellRenderer(new Renderer());
+    list.setFixedCellHeight(ROW);
     list.addMouseListener(
         new MouseAdapter() {
           @Override
@@ -60,7 +63,7 @@ final class FindingsView extends JPanel {
     JButton shut = Theme.named(new JButton("Close"), "findings.close", "Close the findings");
     shut.putClientProperty("JButton.buttonType", "borderless");
     shut.addActionListener(event -> close.run());
-    JPanel head = new JPanel(new MigLayout("insets 2 12 0 8, fillx", "[]push[]"));
+    JPanel head = new JPanel(new MigLayout("insets 0 12 0 8, fillx, h " + HEAD + "!", "[]push[]"));
     head.setOpaque(false);
     head.add(heading);
     head.add(shut, "h 22!");
@@ -69,6 +72,11 @@ final class FindingsView extends JPanel {
     add(head, BorderLayout.NORTH);
     add(scroll, BorderLayout.CENTER);
     updateUI();
+  }
+
+  /** Height in which so many findings are seen whole, pixels. */
+  static int height(int findings) {
+    return 1 + HEAD + findings * ROW;
   }
 
   private void chosen() {
@@ -109,15 +117,15 @@ final class FindingsView extends JPanel {
   /** Two lines a finding: what and where, then the remedy. */
   private final class Renderer implements ListCellRenderer<Finding> {
     private final JPanel cell =
-        new JPanel(new MigLayout("insets 3 12 3 12, gap 8 0", "[70!][]", ""));
+        new JPanel(new MigLayout("insets 3 12 3 12, gap 8 0, novisualpadding", "[56!][grow]", ""));
     private final JLabel severity = new JLabel();
     private final JLabel what = new JLabel();
     private final JLabel remedy = new JLabel();
 
     private Renderer() {
       cell.add(severity);
-      cell.add(what, "wrap");
-      cell.add(remedy, "skip");
+      cell.add(what, "wmin 0, wrap");
+      cell.add(remedy, "skip, wmin 0");
     }
 
     @Override
@@ -140,10 +148,24 @@ final class FindingsView extends JPanel {
       remedy.setText(line.remedy());
       remedy.setFont(Theme.small());
       remedy.setForeground(palette.ink2());
-      cell.getAccessibleContext()
-          .setAccessibleName(
-              line.severity() + ", " + line.where() + ": " + line.what() + " " + line.remedy());
+      String all = line.where() + ": " + line.what() + " " + line.remedy();
+      cell.getAccessibleContext().setAccessibleName(line.severity() + ", " + all);
+      cell.setToolTipText(Tip.of(List.of(line.where() + ": " + line.what(), line.remedy())));
       return cell;
+    }
+  }
+
+  /** A list as wide as its room; what is cut is in the tip. */
+  private static final class Findings extends JList<Finding> {
+    private static final long serialVersionUID = 1L;
+
+    private Findings(DefaultListModel<Finding> model) {
+      super(model);
+    }
+
+    @Override
+    public boolean getScrollableTracksViewportWidth() {
+      return true;
     }
   }
 }

@@ -57,7 +57,7 @@ final class LedgerCells {
   static int width(LedgerColumn column) {
     return switch (column) {
       case NAME -> 240;
-      case BANDS -> 160;
+      case BANDS -> 156;
       case LEVEL -> 62;
       case SHARE -> 108;
       case ALLOWANCE -> 80;
@@ -71,25 +71,24 @@ final class LedgerCells {
   /** Least width of a column. */
   static int least(LedgerColumn column) {
     return switch (column) {
-      case NAME -> 200;
-      case BANDS -> 152;
-      case LEVEL -> 58;
+      case NAME -> 190;
+      case BANDS -> 156;
+      case LEVEL -> 56;
       case SHARE -> 96;
-      case ALLOWANCE -> 72;
-      case MARGIN -> 102;
-      case LAY_UP -> 120;
-      case MASS -> 86;
-      case SUPPLIER -> 72;
+      case ALLOWANCE -> 74;
+      case MARGIN -> 104;
+      case LAY_UP -> 100;
+      case MASS -> 88;
+      case SUPPLIER -> 66;
     };
   }
 
-  /** Most width of a column; what room there is beyond goes to the others. */
+  /** Width up to which bars get what room the texts leave. */
   static int most(LedgerColumn column) {
     return switch (column) {
-      case NAME, LAY_UP, SUPPLIER -> Integer.MAX_VALUE;
-      case BANDS -> 300;
-      case SHARE -> 180;
-      case LEVEL, ALLOWANCE, MARGIN, MASS -> width(column) + 40;
+      case BANDS -> 212;
+      case SHARE -> 160;
+      default -> width(column);
     };
   }
 }

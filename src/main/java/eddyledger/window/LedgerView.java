@@ -27,6 +27,7 @@ public final class LedgerView extends JPanel {
   private final JTable table = new JTable(model);
   private final JScrollPane scroll = new JScrollPane(table);
   private final LedgerCell cell;
+  private final LedgerWidths columns;
   private boolean following;
   private String shown = "";
 
@@ -39,6 +40,7 @@ public final class LedgerView extends JPanel {
     table.setRowHeight(LedgerCells.ROW);
     table.setSelectionMode(ListSelectionModel.SINGLE_SELECTION);
     table.setAutoResizeMode(JTable.AUTO_RESIZE_SUBSEQUENT_COLUMNS);
+    columns = new LedgerWidths(table);
     table.getTableHeader().setReorderingAllowed(false);
     table.getTableHeader().setDefaultRenderer(new LedgerHeaderCell(presenter::heading));
     table.getTableHeader().setPreferredSize(new Dimension(1, LedgerCells.HEADER));
@@ -46,7 +48,6 @@ public final class LedgerView extends JPanel {
       TableColumn of = table.getColumnModel().getColumn(column.ordinal());
       of.setCellRenderer(cell);
       of.setMinWidth(LedgerCells.least(column));
-      of.setMaxWidth(LedgerCells.most(column));
       of.setPreferredWidth(LedgerCells.width(column));
     }
     scroll.setBorder(BorderFactory.createEmptyBorder());
@@ -59,6 +60,20 @@ public final class LedgerView extends JPanel {
     table.addFocusListener(new Focus());
     presenter.onChange(this::refresh);
     refresh();
+  }
+
+  /** The largest height up to this one in which no row is cut, pixels. */
+  static int wholeRows(int height) {
+    int rows = Math.max(0, height - LedgerCells.HEADER) / LedgerCells.ROW;
+    return LedgerCells.HEADER + rows * LedgerCells.ROW;
+  }
+
+  @Override
+  public void doLayout() {
+    // what is left below the last whole row stays blank, so that no line of text is cut
+    int height = getHeight();
+    scroll.setBounds(0, 0, getWidth(), Math.min(height, wholeRows(height)));
+    columns.fit(getWidth() - scroll.getVerticalScrollBar().getPreferredSize().width);
   }
 
   /** Moves the keyboard's focus into the table. */
@@ -88,6 +103,7 @@ public final class LedgerView extends JPanel {
     cell.gutter(Gutter.marks(presenter.sheet(), presenter.selectedId(), presenter.lines()));
     following = true;
     boolean reshaped = model.show(presenter.lines());
+    columns.show(presenter.heading(), presenter.lines());
     int row = presenter.selectedIndex();
     if (row < 0) {
       table.clearSelection();

@@ -1,6 +1,7 @@
 package eddyledger.window;
 
 import eddyledger.chart.ChartStyle;
+import eddyledger.chart.Digits;
 import eddyledger.chart.Palette;
 import eddyledger.chart.Picture;
 import eddyledger.chart.PicturePanel;
@@ -9,6 +10,7 @@ import eddyledger.ledger.ReceiverSheet;
 import eddyledger.present.PicturePresenter;
 import java.awt.BorderLayout;
 import java.awt.CardLayout;
+import java.awt.Insets;
 import java.util.EnumMap;
 import java.util.Map;
 import java.util.Optional;
@@ -24,6 +26,7 @@ import net.miginfocom.swing.MigLayout;
 /** The picture of the selection under its heading, with a switch for the kinds of picture. */
 final class PictureView extends JPanel {
   private static final long serialVersionUID = 1L;
+  private static final int TAB_PAD = 24;
   private static final String DRAWN = "drawn";
   private static final String ABSENT = "absent";
 
@@ -42,7 +45,7 @@ final class PictureView extends JPanel {
     super(new BorderLayout());
     this.presenter = presenter;
     JPanel head =
-        new JPanel(new MigLayout("insets 2 12 0 10, fillx, h 32!", "[]10[0:200:,grow]8[][]4[]"));
+        new JPanel(new MigLayout("insets 2 12 0 10, fillx, h 32!", "[]10[0:200:,grow]8[]2[]8[]"));
     head.setOpaque(false);
     head.add(heading);
     head.add(subHeading, "wmin 0, growx");
@@ -51,10 +54,12 @@ final class PictureView extends JPanel {
       JToggleButton tab = new JToggleButton(kind.word());
       Theme.named(tab, "picture." + kind.word().toLowerCase(), kind.heading());
       tab.putClientProperty("JButton.buttonType", "tab");
+      tab.setMargin(new Insets(2, 8, 2, 8));
       tab.addActionListener(event -> presenter.choose(kind));
       group.add(tab);
       tabs.put(kind, tab);
-      head.add(tab, "h 26!");
+      double width = Digits.width(Theme.strong(12), kind.word());
+      head.add(tab, "h 26!, w " + ((int) Math.ceil(width) + TAB_PAD) + "!");
     }
     whole = Theme.named(new JButton(new WholeIcon()), "picture.whole", "Picture on the whole desk");
     whole.setToolTipText("On the whole desk, and back (Ctrl+Shift+3)");
@@ -76,6 +81,8 @@ final class PictureView extends JPanel {
     subHeading.setText(presenter.subHeading());
     subHeading.setToolTipText(presenter.subHeading());
     tabs.get(presenter.picture()).setSelected(true);
+    tabs.forEach(
+        (kind, tab) -> tab.setFont(kind == presenter.picture() ? Theme.strong(12) : Theme.body()));
     Optional<ReceiverSheet> sheet = presenter.sheet();
     if (sheet.isPresent()) {
       ChartStyle style = new ChartStyle(Theme.palette(), Theme.body());
@@ -97,7 +104,6 @@ final class PictureView extends JPanel {
       subHeading.setFont(Theme.small());
       subHeading.setForeground(palette.ink2());
       absence.setForeground(palette.ink2());
-      tabs.values().forEach(tab -> tab.setFont(Theme.body()));
       refresh();
     }
   }

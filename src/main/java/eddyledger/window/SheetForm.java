@@ -48,7 +48,8 @@ final class SheetForm extends JPanel implements Scrollable {
   SheetForm(SheetPresenter presenter, JComponent traceButton) {
     super(
         new MigLayout(
-            "insets 10 16 12 4, gap 0, wrap 1, fillx, hidemode 3, novisualpadding", "[grow,fill]"));
+            "insets 10 16 12 4, gap 0, wrap 1, fillx, hidemode 3, novisualpadding",
+            "[0:480:480,grow,fill]"));
     this.presenter = presenter;
     this.traceButton = traceButton;
   }

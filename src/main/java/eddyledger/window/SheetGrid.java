@@ -25,7 +25,7 @@ final class SheetGrid extends JPanel {
     setLayout(
         new MigLayout(
             "insets 0, gap 0, hidemode 3, novisualpadding, wrap " + 2 * COLUMNS,
-            "[31!]5[40!]5[31!]5[40!]5[31!]5[40!]5[31!]5[40!]"));
+            "[31!]4[36:40:]4[31!]4[36:40:]4[31!]4[36:40:]4[31!]4[36:40:]"));
     setOpaque(false);
     for (SheetField field : fields) {
       SheetInput input = SheetInput.of(field, presenter);
@@ -35,7 +35,7 @@ final class SheetGrid extends JPanel {
       inputs.put(field.key(), input);
       labels.put(field.key(), label);
       add(label, "growx, h 23!");
-      add(input.component(), "growx, h 20!, w 40!");
+      add(input.component(), "growx, h 20!, w 36:40:48");
     }
     add(message, "newline, span, growx, wmin 0, gapbottom 4");
   }

@@ -23,10 +23,11 @@ import net.miginfocom.swing.MigLayout;
 final class SheetRowView extends JPanel {
   private static final int MESSAGE_WIDTH = 214;
   private static final int LONGEST_NUMBER = 12;
-  private static final String ORIGIN = ", wmin 0, growx";
-  private static final String BACK = ", wmin 0, growx, h 20!";
-  private static final int CHOICE = 118;
+  private static final String ORIGIN = ", growx";
+  private static final String BACK = ", growx, h 20!";
+  private static final int CHOICE = 119;
   private static final int WIDE_CHOICE = 156;
+  private static final int LONG_CHOICE = 224;
   private static final int ROOM_FOR_ARROW = 25;
 
   private final SheetPresenter presenter;
@@ -48,7 +49,7 @@ final class SheetRowView extends JPanel {
     layout =
         new MigLayout(
             "insets 0, gap 0, hidemode 3, novisualpadding",
-            "[98!][78!]6[34!]3[grow,fill]",
+            "[96!][78!]6[35!]4[grow,fill]",
             "[22::,center][]0[]");
     setLayout(layout);
     setOpaque(false);
@@ -56,7 +57,7 @@ final class SheetRowView extends JPanel {
     label.setLabelFor(input.component());
     unit.setFont(Theme.small());
     origin.setFont(Theme.small());
-    add(label, "cell 0 0, wmin 0, wmax 96");
+    add(label, "cell 0 0, wmin 0, wmax 94");
     add(input.component(), place(field));
     add(unit, "cell 2 0, wmin 0");
     add(origin, behind(field) + ORIGIN);
@@ -84,7 +85,8 @@ final class SheetRowView extends JPanel {
       return "cell 1 0 3 1, growx, wmin 0" + (field.kind() == Kind.TEXT ? ", h 20!" : "");
     }
     if (field.kind() == Kind.CHOICE) {
-      return "cell 1 0 3 1, h 20!, w " + (fits(field) ? CHOICE : WIDE_CHOICE) + "!";
+      String width = fits(field) ? CHOICE + "!" : WIDE_CHOICE + ":" + LONG_CHOICE + ":";
+      return "cell 1 0 3 1, h 20!, w " + width;
     }
     String size = wide(field) ? "cell 1 0 3 1, w " + WIDE_CHOICE + "!" : "cell 1 0, w 78!";
     return size + ", h 20!";
@@ -101,7 +103,9 @@ final class SheetRowView extends JPanel {
   }
 
   private static String behind(SheetField field) {
-    return field.kind() == Kind.CHOICE || wide(field) ? "cell 1 0, gapleft 4" : "cell 3 0";
+    return field.kind() == Kind.CHOICE || wide(field)
+        ? "cell 1 0, gapleft 4, wmin 56"
+        : "cell 3 0, wmin 0";
   }
 
   /** The component that takes the focus. */

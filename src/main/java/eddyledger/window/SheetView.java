@@ -39,7 +39,7 @@ public final class SheetView extends JPanel {
             form, JScrollPane.VERTICAL_SCROLLBAR_ALWAYS, JScrollPane.HORIZONTAL_SCROLLBAR_NEVER);
     scroll.setBorder(BorderFactory.createEmptyBorder());
     scroll.getVerticalScrollBar().setUnitIncrement(22);
-    add(scroll);
+    add(new SoftEdge(scroll));
     Theme.named(this, "sheet", "Sheet of the selected row");
     presenter.listen(this::refresh);
     refresh();

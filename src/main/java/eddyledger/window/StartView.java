@@ -103,7 +103,7 @@ public final class StartView extends JPanel {
     caution.setLineWrap(true);
     caution.setWrapStyleWord(true);
     caution.setOpaque(false);
-    caution.setBorder(null);
+    caution.setBorder(BorderFactory.createEmptyBorder());
     Theme.named(caution, "start.caution", StartPage.caution());
     JPanel inner =
         new JPanel(
@@ -122,9 +122,11 @@ public final class StartView extends JPanel {
     inner.add(keys, "wrap");
     inner.add(drop, "span, wrap");
     inner.add(caution, "span, growx, wmin 0");
-    JPanel centred = new JPanel(new MigLayout("insets 0, fill", "[center]", "[center]"));
+    JPanel centred =
+        new JPanel(new MigLayout("insets 0, fill", "[center]", "[0::,grow 38]0[]0[0::,grow 62]"));
     centred.setOpaque(false);
-    centred.add(inner, "wmin 0, hmin 0");
+    // a little above the middle, where a page looks balanced
+    centred.add(inner, "cell 0 1, wmin 0, hmin 0");
     return centred;
   }
 
@@ -137,8 +139,8 @@ public final class StartView extends JPanel {
     JButton open = Theme.named(new JButton("Open…"), "start.open", "Open a project file");
     open.setMnemonic(KeyEvent.VK_O);
     open.addActionListener(event -> actions.chooseFile());
-    buttons.add(empty);
-    buttons.add(open);
+    buttons.add(empty, "h 27!");
+    buttons.add(open, "h 27!");
     return buttons;
   }
 

@@ -10,6 +10,7 @@ import java.awt.Font;
 import java.awt.Insets;
 import java.util.Map;
 import javax.swing.JComponent;
+import javax.swing.JDialog;
 import javax.swing.JFrame;
 import javax.swing.UIManager;
 import javax.swing.plaf.ColorUIResource;
@@ -42,6 +43,7 @@ public final class Theme {
     measures();
     colours(palette);
     JFrame.setDefaultLookAndFeelDecorated(true);
+    JDialog.setDefaultLookAndFeelDecorated(true);
     if (changed) {
       FlatLaf.updateUI();
     }
@@ -63,6 +65,7 @@ public final class Theme {
     UIManager.put("Table.intercellSpacing", new java.awt.Dimension(0, 0));
     UIManager.put("SplitPane.dividerSize", 7);
     UIManager.put("SplitPaneDivider.style", "plain");
+    UIManager.put("ToggleButton.tab.underlineHeight", 2);
     UIManager.put("TitlePane.showIcon", false);
     UIManager.put("TitlePane.centerTitle", true);
   }
@@ -82,6 +85,15 @@ public final class Theme {
     put("MenuBar.borderColor", palette.ground());
     put("TitlePane.background", palette.ground());
     put("TitlePane.unifiedBackground", Boolean.TRUE);
+    put("ToggleButton.tab.underlineColor", palette.ink());
+    put("ToggleButton.tab.disabledUnderlineColor", palette.ink3());
+    put("ToggleButton.tab.selectedBackground", palette.paper());
+    put("ToggleButton.tab.hoverBackground", palette.ground());
+    put("ToggleButton.tab.focusBackground", palette.selection());
+    put("ToggleButton.selectedBackground", palette.selection());
+    put("ToggleButton.selectedForeground", palette.ink());
+    put("RootPane.activeBorderColor", palette.ink3());
+    put("RootPane.inactiveBorderColor", palette.hairline());
     put("ToolTip.background", palette.field());
     put("ToolTip.foreground", palette.ink());
   }

@@ -123,7 +123,7 @@ public final class TraceView extends JPanel {
     reason.setWrapStyleWord(true);
     reason.setBorder(BorderFactory.createEmptyBorder(24, 24, 24, 24));
     middle.setOpaque(false);
-    middle.add(scroll, STEPS);
+    middle.add(new SoftEdge(scroll), STEPS);
     middle.add(table.scrolled(), NUMBERS);
     middle.add(reason, REASON);
     return middle;

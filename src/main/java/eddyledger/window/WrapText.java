@@ -1,6 +1,7 @@
 package eddyledger.window;
 
 import java.awt.Dimension;
+import javax.swing.BorderFactory;
 import javax.swing.JTextArea;
 import javax.swing.SwingUtilities;
 import javax.swing.text.DefaultCaret;
@@ -20,7 +21,8 @@ final class WrapText extends JTextArea {
     setLineWrap(true);
     setWrapStyleWord(true);
     setOpaque(false);
-    setBorder(null);
+    // an empty border of our own stays when the theme changes, none at all would not
+    setBorder(BorderFactory.createEmptyBorder());
     setFont(Theme.small());
     // the caret would scroll the sheet to whatever text changed last
     DefaultCaret still = new DefaultCaret();

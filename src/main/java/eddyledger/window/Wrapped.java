@@ -8,7 +8,7 @@ import javax.swing.JTextArea;
 /** Running text in several lines that can be selected, copied and read aloud. */
 final class Wrapped {
   private static final int WIDTH = 440;
-  private static final int TALLEST = 420;
+  private static final int TALLEST = 600;
 
   private Wrapped() {}
 
