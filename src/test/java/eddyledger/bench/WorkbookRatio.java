@@ -8,6 +8,9 @@ import java.util.Arrays;
 /**
  * The workbook against the bare library in turns, so that other load on the machine meets both
  * alike: medians of wall and processor time, and their ratios. Argument: rounds, 7 if none.
+ *
+ * <p>{@code mvn -q test-compile exec:java -Dexec.classpathScope=test
+ * -Dmain.class=eddyledger.bench.WorkbookRatio -Dexec.args=7}
  */
 final class WorkbookRatio {
   private static final int[] SIZES = {45, 300, 2000};

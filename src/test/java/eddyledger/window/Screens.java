@@ -37,6 +37,7 @@ final class Screens {
       save(harness, folder.resolve("start-" + end));
       harness.openByDialog(example);
       harness.clickTile("tile-cruise-row-2");
+      harness.window.table("ledger").focus();
       harness.select("upper-side-left-a");
       save(harness, folder.resolve("desk-" + end));
       harness.press(KeyEvent.VK_P, KeyEvent.VK_CONTROL);
