@@ -1,5 +1,6 @@
 package eddyledger.present;
 
+import eddyledger.check.Finding;
 import eddyledger.model.Construction;
 import eddyledger.model.LayUp;
 import eddyledger.model.OperatingCondition;
@@ -12,26 +13,28 @@ import eddyledger.model.Zone;
 import java.util.List;
 import java.util.Objects;
 import java.util.function.Function;
-import java.util.stream.Stream;
 
 /** What a finding says in the names the lead gave, instead of the ids of the project file. */
 final class FindingWords {
   private FindingWords() {}
 
-  /** The name of what has an id; empty if nothing has it, or it has no name. */
-  static String name(Vehicle vehicle, String id) {
-    return Stream.of(
-            TreeEdit.find(vehicle, id).map(path -> path.node().name()).orElse(""),
-            name(vehicle.zones(), id, Zone::id, Zone::name),
-            name(vehicle.receivers(), id, Receiver::id, Receiver::name),
-            name(vehicle.constructions(), id, Construction::id, Construction::name),
-            name(vehicle.layUps(), id, LayUp::id, LayUp::name),
-            name(vehicle.otherSources(), id, OtherSource::id, OtherSource::name),
-            name(vehicle.targets(), id, Target::id, Target::name),
-            name(vehicle.conditions(), id, OperatingCondition::id, OperatingCondition::name))
-        .filter(name -> !name.isEmpty())
-        .findFirst()
-        .orElse("");
+  /** The name of what a finding is about; empty if that has none, or the place is another's. */
+  static String name(Vehicle vehicle, Finding finding) {
+    String id = finding.subject();
+    String place = finding.place();
+    String list = place.substring(0, Math.max(0, place.indexOf('[')));
+    return switch (list) {
+      case "zones" -> name(vehicle.zones(), id, Zone::id, Zone::name);
+      case "receivers" -> name(vehicle.receivers(), id, Receiver::id, Receiver::name);
+      case "constructions" ->
+          name(vehicle.constructions(), id, Construction::id, Construction::name);
+      case "lay_ups" -> name(vehicle.layUps(), id, LayUp::id, LayUp::name);
+      case "other_sources" -> name(vehicle.otherSources(), id, OtherSource::id, OtherSource::name);
+      case "targets" -> name(vehicle.targets(), id, Target::id, Target::name);
+      case "conditions" ->
+          name(vehicle.conditions(), id, OperatingCondition::id, OperatingCondition::name);
+      default -> TreeEdit.find(vehicle, id).map(path -> path.node().name()).orElse("");
+    };
   }
 
   private static <T> String name(

@@ -52,7 +52,7 @@ public final class FindingsPresenter {
     if (!state.open() || finding.subject().isEmpty()) {
       return "";
     }
-    return FindingWords.name(state.vehicle(), finding.subject());
+    return FindingWords.name(state.vehicle(), finding);
   }
 
   /** How many there are and whether one stops a level, for the status line. */

@@ -34,6 +34,14 @@ final class LedgerWidths {
 
   LedgerWidths(JTable table) {
     this.table = table;
+    // a column dragged by its edge keeps its width from then on
+    for (int i = 0; i < table.getColumnCount(); i++) {
+      table
+          .getColumnModel()
+          .getColumn(i)
+          .addPropertyChangeListener(
+              event -> dragged |= table.getTableHeader().getResizingColumn() != null);
+    }
   }
 
   /** Takes the heading and the lines whose texts are to fit. */
@@ -74,7 +82,6 @@ final class LedgerWidths {
 
   private void share() {
     TableColumnModel model = table.getColumnModel();
-    dragged |= table.getTableHeader().getResizingColumn() != null;
     if (dragged || width <= 0) {
       return;
     }
@@ -99,7 +106,7 @@ final class LedgerWidths {
     left -= grow(widths, LedgerColumn.SHARE, LedgerCells.most(LedgerColumn.SHARE), left);
     int bands = LedgerCells.most(LedgerColumn.BANDS) - widths[LedgerColumn.BANDS.ordinal()];
     // bars are whole pixels wide, so less than one more for each of them would be lost
-    int each = Math.min(bands, left) / Bands.COUNT;
+    int each = Math.max(0, Math.min(bands, left)) / Bands.COUNT;
     widths[LedgerColumn.BANDS.ordinal()] += each * Bands.COUNT;
     left -= each * Bands.COUNT;
     left -= grow(widths, LedgerColumn.LAY_UP, MOST_TEXT, left);
