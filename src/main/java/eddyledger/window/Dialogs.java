@@ -103,6 +103,7 @@ final class Dialogs {
     return answer == 0 ? Unsaved.SAVE : answer == 1 ? Unsaved.DISCARD : Unsaved.CANCEL;
   }
 
+  /** Asks; the answer that loses nothing is the default: the last of two, the first of three. */
   private int ask(String title, String text, String... answers) {
     return JOptionPane.showOptionDialog(
         parent,
@@ -112,7 +113,7 @@ final class Dialogs {
         JOptionPane.QUESTION_MESSAGE,
         null,
         answers,
-        answers[0]);
+        answers.length == 2 ? answers[1] : answers[0]);
   }
 
   /** Tells what went wrong. */

@@ -20,11 +20,10 @@ import org.assertj.swing.edt.GuiActionRunner;
 import org.assertj.swing.fixture.FrameFixture;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
-import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 
 /** The sheet under real keys and a real mouse. */
-@Tag("gui")
+@WindowTest
 class SheetViewTest {
   private final Projects projects = new Projects(new ProjectReader());
   private final Vehicle example =

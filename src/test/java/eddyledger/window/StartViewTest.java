@@ -18,11 +18,10 @@ import javax.swing.AbstractButton;
 import javax.swing.JList;
 import javax.swing.SwingUtilities;
 import org.junit.jupiter.api.BeforeAll;
-import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 
 /** The start page: keyboard and buttons do what they say. */
-@Tag("gui")
+@WindowTest
 class StartViewTest {
   private static final Instant NOW = Instant.parse("2026-12-01T09:30:00Z");
   private static final Path FIRST = Path.of("a.eddyledger").toAbsolutePath();

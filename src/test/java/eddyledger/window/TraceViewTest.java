@@ -17,11 +17,10 @@ import javax.swing.JComboBox;
 import javax.swing.JTable;
 import javax.swing.SwingUtilities;
 import org.junit.jupiter.api.BeforeAll;
-import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 
 /** The view of a trace: its controls do what they say, its rows can be read by a screen reader. */
-@Tag("gui")
+@WindowTest
 class TraceViewTest {
   private static Ledger ledger;
 
