@@ -27,11 +27,19 @@ public final class Projects {
   public OpenedProject open(Path file) {
     try {
       ReadResult result = reader.read(file);
-      Optional<Vehicle> usable = result.fatal() ? Optional.empty() : result.vehicle();
+      boolean unusable = result.findings().stream().anyMatch(Projects::closes);
+      Optional<Vehicle> usable = unusable ? Optional.empty() : result.vehicle();
       return new OpenedProject(file, usable, result.findings());
     } catch (IOException e) {
       return new OpenedProject(file, Optional.empty(), List.of(unreadable(file, e)));
     }
+  }
+
+  /**
+   * A vehicle without panels can be saved, so it can be opened too: panels are added at the desk.
+   */
+  private static boolean closes(Finding finding) {
+    return finding.severity() == Severity.FATAL && !finding.code().equals("empty-vehicle");
   }
 
   /**

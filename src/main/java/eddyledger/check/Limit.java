@@ -1,5 +1,7 @@
 package eddyledger.check;
 
+import java.math.BigDecimal;
+
 /**
  * Between which values a quantity of a vehicle is believable; outside it the entry is taken for a
  * slip, mostly of the unit. The limits are our own judgement, wide on purpose; no source.
@@ -111,7 +113,7 @@ public enum Limit {
     String number =
         value == Math.rint(value) && Math.abs(value) < 1.0e7
             ? Long.toString((long) value)
-            : Double.toString(value);
+            : BigDecimal.valueOf(value).stripTrailingZeros().toPlainString();
     return unit.isEmpty() ? number : number + " " + unit;
   }
 }

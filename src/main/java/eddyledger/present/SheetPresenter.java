@@ -21,7 +21,8 @@ import java.util.function.UnaryOperator;
  * what is typed and chosen into edits or messages. Used on one thread.
  *
  * <p>While a field has the focus its edits count as one step of undo; what was typed but cannot be
- * taken stays in the field with a message, and the vehicle keeps the last value that could.
+ * taken stays in the field with a message, and the vehicle keeps the last value that could; when
+ * the field is left so, it holds again what it held before.
  */
 public final class SheetPresenter {
   private final ProjectState state;
@@ -167,6 +168,10 @@ public final class SheetPresenter {
       if (stay.typed(key).filter(String::isBlank).isPresent()) {
         entry(key).ifPresent(entry -> take(entry, ""));
       }
+      if (stay.refusal(key).isPresent()) {
+        // the beginning of what could not be taken is not what was meant
+        restore(key);
+      }
       stay.forget();
       state.endMerging();
       tell();
@@ -176,12 +181,16 @@ public final class SheetPresenter {
   /** Takes back all that was done in a field since it was entered. */
   public void escape(String key) {
     if (stay.in(key) && state.open()) {
-      Vehicle before = stay.before();
-      String mergeKey = stay.mergeKey(state.selection().rowId());
-      entry(key).ifPresent(entry -> apply(entry, mergeKey, vehicle -> before));
+      restore(key);
       stay.begin(key, state.vehicle());
       tell();
     }
+  }
+
+  private void restore(String key) {
+    Vehicle before = stay.before();
+    String mergeKey = stay.mergeKey(state.selection().rowId());
+    entry(key).ifPresent(entry -> apply(entry, mergeKey, vehicle -> before));
   }
 
   /** Gives a field's own value back. */

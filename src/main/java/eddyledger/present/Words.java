@@ -1,11 +1,19 @@
 package eddyledger.present;
 
+import java.util.regex.Pattern;
+
 /** Small changes to words. */
 final class Words {
+  /** A hyphen that stands for a minus before a number. */
+  private static final Pattern MINUS = Pattern.compile("(?<![\\w-])-(?=\\d)");
+
   private Words() {}
 
-  /** With a capital at its start. */
+  /** With a capital at its start, and every minus as U+2212. */
   static String sentence(String words) {
-    return words.isEmpty() ? words : Character.toUpperCase(words.charAt(0)) + words.substring(1);
+    String signed = MINUS.matcher(words).replaceAll("−");
+    return signed.isEmpty()
+        ? signed
+        : Character.toUpperCase(signed.charAt(0)) + signed.substring(1);
   }
 }

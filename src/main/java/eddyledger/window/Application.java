@@ -92,9 +92,10 @@ public final class Application {
     switch (aspect) {
       case PROJECT -> {
         remembered = null;
+        // what is there to be chosen from decides what the start page gives the focus to
+        refreshStart();
         page(state.open() ? DESK : START);
         compute();
-        refreshStart();
       }
       case VEHICLE -> compute();
       case LEDGER -> {

@@ -39,7 +39,11 @@ final class SheetForm extends JPanel implements Scrollable {
       new FocusAdapter() {
         @Override
         public void focusGained(FocusEvent event) {
-          SheetView.reveal((JComponent) event.getComponent());
+          // what is in sight must not move: the mouse may have pressed and not yet released it
+          JComponent component = (JComponent) event.getComponent();
+          if (component.getVisibleRect().height < component.getHeight()) {
+            SheetView.reveal(component);
+          }
         }
       };
   private final List<String> wanted = new ArrayList<>();

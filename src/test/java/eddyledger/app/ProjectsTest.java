@@ -82,6 +82,14 @@ class ProjectsTest {
   }
 
   @Test
+  void aVehicleWithoutPanelsIsOpenedAndSaysSo() throws IOException {
+    OpenedProject opened =
+        projects.open(file(new SmallFile().with("tree", "[]").root().toString()));
+    assertThat(opened.vehicle()).isPresent();
+    assertThat(opened.findings()).extracting(Finding::code).contains("empty-vehicle");
+  }
+
+  @Test
   void aFaultyPanelDoesNotKeepTheProjectFromBeingOpened() throws IOException {
     String length = "tree[0].children[0].length_m";
     SmallFile faulty = new SmallFile().with(length, "900");

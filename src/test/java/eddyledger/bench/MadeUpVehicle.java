@@ -27,12 +27,13 @@ import java.util.Random;
  * and two receivers. Sizes are those of car and aircraft panels: 0.2 to 0.9 m by 0.2 to 0.6 m,
  * glass, steel and aluminium.
  */
-final class MadeUpVehicle {
+public final class MadeUpVehicle {
   private static final int PANELS_A_SECTION = 20;
 
   private MadeUpVehicle() {}
 
-  static Vehicle of(int panels) {
+  /** A vehicle of so many panels, none like another. */
+  public static Vehicle of(int panels) {
     Random random = new Random(20261201L);
     List<Node> sections = new ArrayList<>();
     List<Node> children = new ArrayList<>();

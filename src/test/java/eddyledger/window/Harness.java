@@ -37,7 +37,7 @@ import org.assertj.swing.timing.Timeout;
 
 /** The program's own window, driven by the keys and mouse of a robot. */
 final class Harness implements AutoCloseable {
-  private static final long PATIENCE_S = 60;
+  private static final long PATIENCE_S = 30;
 
   private final Preferences store;
   private final Robot robot;
@@ -52,10 +52,23 @@ final class Harness implements AutoCloseable {
   }
 
   Harness(int width, int height, Palette palette) {
-    store = Preferences.userRoot().node("eddyledger-test-" + System.nanoTime());
-    WindowMemory memory = new WindowMemory(store);
-    memory.palette(palette);
+    this(freshStore(palette));
+    size(width, height);
+  }
+
+  /** A place for settings that nothing else has. */
+  static Preferences freshStore(Palette palette) {
+    Preferences fresh = Preferences.userRoot().node("eddyledger-test-" + System.nanoTime());
+    new WindowMemory(fresh).palette(palette);
+    return fresh;
+  }
+
+  /** A window as its settings say. */
+  Harness(Preferences settings) {
+    store = settings;
     robot = BasicRobot.robotWithNewAwtHierarchy();
+    robot.settings().delayBetweenEvents(20);
+    robot.settings().eventPostingDelay(40);
     robot.settings().timeoutToFindSubMenu(2000);
     Thread.setDefaultUncaughtExceptionHandler(
         (thread, thrown) -> {
@@ -80,6 +93,12 @@ final class Harness implements AutoCloseable {
               return application.frame();
             });
     window = new FrameFixture(robot, frame);
+    robot.waitForIdle();
+    // what has the focus within the window is the program's own choice
+    until("the window has the keyboard", () -> window.target().isFocused());
+  }
+
+  private void size(int width, int height) {
     window.show(new Dimension(width, height));
     window.moveTo(new java.awt.Point(0, 0));
     until(
@@ -322,6 +341,13 @@ final class Harness implements AutoCloseable {
   static Path example(Path folder) throws java.io.IOException {
     return Files.copy(
         Path.of("examples", "quillon-82.eddyledger"), folder.resolve("quillon-82.eddyledger"));
+  }
+
+  /** Ends the robot's work with a window that was closed by its user; settings are kept. */
+  void leave() {
+    window.cleanUp();
+    Thread.setDefaultUncaughtExceptionHandler(null);
+    assertThat(fault.get()).as("faults of the program").isNull();
   }
 
   @Override

@@ -1,0 +1,74 @@
+package eddyledger.window;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.awt.Toolkit;
+import java.awt.datatransfer.DataFlavor;
+import java.awt.event.KeyEvent;
+import java.io.IOException;
+import org.junit.jupiter.api.BeforeEach;
+import org.junit.jupiter.api.Test;
+
+/** The trace follows what is done: edits, receivers, undo; and goes out as text. */
+@WindowTest
+class TraceFlowTest extends WindowFlow {
+  private static final String PANEL = "upper-side-left-a";
+
+  @BeforeEach
+  void open() throws IOException {
+    harness.openByDialog(Harness.example(folder));
+    harness.clickTile("tile-hold-row-2");
+    harness.clickRow(PANEL);
+  }
+
+  private void trace() {
+    harness.press(KeyEvent.VK_T, KeyEvent.VK_CONTROL);
+    harness.until("the trace shows", () -> harness.shows("trace"));
+  }
+
+  private String copied() throws Exception {
+    harness.window.button("trace.copy").click();
+    return (String)
+        Toolkit.getDefaultToolkit().getSystemClipboard().getData(DataFlavor.stringFlavor);
+  }
+
+  @Test
+  void theAccountIsOfTheVehicleAsItWasEdited() throws Exception {
+    trace();
+    assertThat(copied()).contains("61.0");
+    harness.press(KeyEvent.VK_ESCAPE);
+    hands.change("count", "66");
+    assertThat(harness.row(PANEL)).contains("64.0 dB(A)");
+    trace();
+    assertThat(copied()).contains("64.0").doesNotContain("61.0 dB(A)");
+    harness.press(KeyEvent.VK_Z, KeyEvent.VK_CONTROL);
+    harness.ready();
+    assertThat(harness.shows("trace")).isTrue();
+    assertThat(copied()).contains("61.0").doesNotContain("64.0 dB(A)");
+  }
+
+  @Test
+  void theReceiverChangesOnTheTraceToo() throws Exception {
+    trace();
+    assertThat(harness.window.label("trace.title").text()).contains("Upper side left, station A");
+    assertThat(copied()).contains("Heard at Row 2, window seat in Holding");
+    harness.press(KeyEvent.VK_F6);
+    assertThat(copied()).contains("Heard at Row 9, window seat in Holding");
+    harness.press(KeyEvent.VK_F7);
+    assertThat(copied()).contains("Heard at Row 9, window seat in Cruise");
+    harness.press(KeyEvent.VK_ESCAPE);
+    assertThat(harness.selectedTile()).startsWith("Row 9, Cruise");
+  }
+
+  @Test
+  void allNumbersAndStepsAreSwitched() {
+    trace();
+    harness.window.toggleButton("trace.show-numbers").click();
+    assertThat(harness.shows("trace.stages")).isFalse();
+    harness.window.toggleButton("trace.show-steps").click();
+    assertThat(harness.shows("trace.stages")).isTrue();
+    harness.window.button("trace.back").click();
+    assertThat(harness.shows("ledger")).isTrue();
+    harness.until("the ledger has the focus", () -> hands.focused().equals("ledger"));
+  }
+}
