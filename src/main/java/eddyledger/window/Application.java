@@ -175,8 +175,10 @@ public final class Application {
 
   private void page(String name) {
     page = name;
-    cards.show(pages, name);
     desk.statusView().setVisible(!name.equals(START));
+    // the desk divides its height when it comes to be seen, so it must have its own by then
+    frame.validate();
+    cards.show(pages, name);
     if (name.equals(DESK)) {
       desk.toLedger();
     }

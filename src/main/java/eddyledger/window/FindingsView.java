@@ -5,6 +5,7 @@ import eddyledger.check.Finding;
 import eddyledger.present.FindingsPresenter;
 import java.awt.BorderLayout;
 import java.awt.Component;
+import java.awt.dnd.DropTarget;
 import java.awt.event.ActionEvent;
 import java.awt.event.MouseAdapter;
 import java.awt.event.MouseEvent;
@@ -161,6 +162,12 @@ final class FindingsView extends JPanel {
 
     private Findings(DefaultListModel<Finding> model) {
       super(model);
+    }
+
+    @Override
+    public synchronized void setDropTarget(DropTarget target) {
+      // a file that is dropped here is meant for the window
+      super.setDropTarget(null);
     }
 
     @Override

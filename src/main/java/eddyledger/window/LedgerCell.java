@@ -11,6 +11,7 @@ import java.awt.Graphics2D;
 import java.awt.event.MouseEvent;
 import java.util.List;
 import java.util.function.Supplier;
+import javax.accessibility.Accessible;
 import javax.accessibility.AccessibleContext;
 import javax.accessibility.AccessibleRole;
 import javax.swing.JComponent;
@@ -18,7 +19,7 @@ import javax.swing.JTable;
 import javax.swing.table.TableCellRenderer;
 
 /** Renders every cell of the ledger. */
-final class LedgerCell extends JComponent implements TableCellRenderer {
+final class LedgerCell extends JComponent implements TableCellRenderer, Accessible {
   private final Lettering lettering = new Lettering();
   private final Supplier<LedgerHeading> heading;
   private List<GutterMark> gutter = List.of();

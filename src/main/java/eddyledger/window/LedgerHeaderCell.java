@@ -13,13 +13,14 @@ import java.awt.Graphics2D;
 import java.awt.event.MouseEvent;
 import java.util.List;
 import java.util.function.Supplier;
+import javax.accessibility.Accessible;
 import javax.accessibility.AccessibleContext;
 import javax.swing.JComponent;
 import javax.swing.JTable;
 import javax.swing.table.TableCellRenderer;
 
 /** Renders the header of the ledger. */
-final class LedgerHeaderCell extends JComponent implements TableCellRenderer {
+final class LedgerHeaderCell extends JComponent implements TableCellRenderer, Accessible {
   private static final int TEXT = 18;
 
   private final Lettering lettering = new Lettering();

@@ -6,6 +6,7 @@ import eddyledger.present.LedgerPresenter;
 import java.awt.BorderLayout;
 import java.awt.Color;
 import java.awt.Dimension;
+import java.awt.dnd.DropTarget;
 import java.awt.event.FocusAdapter;
 import java.awt.event.FocusEvent;
 import java.awt.event.MouseAdapter;
@@ -24,7 +25,7 @@ import javax.swing.table.TableColumn;
 public final class LedgerView extends JPanel {
   private final LedgerPresenter presenter;
   private final LedgerTableModel model = new LedgerTableModel();
-  private final JTable table = new JTable(model);
+  private final JTable table = new Table(model);
   private final JScrollPane scroll = new JScrollPane(table);
   private final LedgerCell cell;
   private final LedgerWidths columns;
@@ -145,6 +146,18 @@ public final class LedgerView extends JPanel {
       if (chevron || twice) {
         presenter.toggle(row);
       }
+    }
+  }
+
+  /** A table that leaves a dropped file to the window. */
+  private static final class Table extends JTable {
+    private Table(LedgerTableModel model) {
+      super(model);
+    }
+
+    @Override
+    public synchronized void setDropTarget(DropTarget target) {
+      super.setDropTarget(null);
     }
   }
 

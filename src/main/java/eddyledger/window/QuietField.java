@@ -1,6 +1,7 @@
 package eddyledger.window;
 
 import java.awt.Insets;
+import java.awt.dnd.DropTarget;
 import java.awt.event.FocusEvent;
 import java.awt.event.FocusListener;
 import javax.swing.BorderFactory;
@@ -35,6 +36,12 @@ final class QuietField extends JTextField {
   void quiet(boolean value) {
     quiet = value;
     dress();
+  }
+
+  @Override
+  public synchronized void setDropTarget(DropTarget target) {
+    // a file that is dropped here is meant for the window
+    super.setDropTarget(null);
   }
 
   private void dress() {

@@ -1,6 +1,7 @@
 package eddyledger.window;
 
 import java.awt.Dimension;
+import java.awt.dnd.DropTarget;
 import javax.swing.BorderFactory;
 import javax.swing.JTextArea;
 import javax.swing.SwingUtilities;
@@ -28,6 +29,12 @@ final class WrapText extends JTextArea {
     DefaultCaret still = new DefaultCaret();
     still.setUpdatePolicy(DefaultCaret.NEVER_UPDATE);
     setCaret(still);
+  }
+
+  @Override
+  public synchronized void setDropTarget(DropTarget target) {
+    // a file that is dropped here is meant for the window
+    super.setDropTarget(null);
   }
 
   @Override

@@ -41,13 +41,13 @@ class BigVehicleTest extends WindowFlow {
     harness.until("cancelling is offered", () -> harness.shows("status.cancel"));
     assertThat(hands.status()).startsWith("Computing");
     assertThat(harness.row("made-up")).as("still legible").isEqualTo(before);
-    assertThat(hands.ledgerHeading()).contains("before the last change");
+    assertThat(hands.ledgerHeading()).contains("earlier levels");
     harness.press(KeyEvent.VK_PERIOD, KeyEvent.VK_CONTROL);
     harness.until("it is cancelled", () -> hands.status().startsWith("Cancelled"));
     assertThat(harness.row("made-up")).isEqualTo(before);
     harness.press(KeyEvent.VK_F5);
     harness.ready();
     assertThat(harness.row("made-up")).isNotEqualTo(before);
-    assertThat(hands.ledgerHeading()).doesNotContain("before the last change");
+    assertThat(hands.ledgerHeading()).doesNotContain("earlier levels");
   }
 }

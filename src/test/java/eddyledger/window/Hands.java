@@ -5,16 +5,17 @@ import java.awt.Dialog;
 import java.awt.KeyboardFocusManager;
 import java.awt.Window;
 import java.awt.event.KeyEvent;
+import java.awt.event.MouseEvent;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Objects;
 import java.util.Optional;
 import java.util.stream.Collectors;
 import javax.swing.AbstractButton;
-import javax.swing.JComponent;
 import javax.swing.JMenuItem;
 import javax.swing.JTable;
 import javax.swing.SwingUtilities;
+import javax.swing.table.JTableHeader;
 import javax.swing.text.JTextComponent;
 import org.assertj.swing.core.GenericTypeMatcher;
 import org.assertj.swing.edt.GuiActionRunner;
@@ -187,12 +188,10 @@ final class Hands {
   String ledgerHeading() {
     JTable table = harness.window.table("ledger").target();
     return GuiActionRunner.execute(
-        () ->
-            ((JComponent)
-                    table
-                        .getTableHeader()
-                        .getDefaultRenderer()
-                        .getTableCellRendererComponent(table, "", false, false, -1, 0))
-                .getToolTipText());
+        () -> {
+          JTableHeader header = table.getTableHeader();
+          return header.getToolTipText(
+              new MouseEvent(header, MouseEvent.MOUSE_MOVED, 0, 0, 20, 8, 0, false));
+        });
   }
 }

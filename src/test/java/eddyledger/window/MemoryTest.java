@@ -57,7 +57,7 @@ class MemoryTest {
     first.openByDialog(example);
     int ledgerBefore = size(first, "ledger").width;
     drag(first, true, -90);
-    drag(first, false, 70);
+    drag(first, false, -70);
     Dimension sheet = size(first, "sheet");
     Dimension picture = size(first, "picture");
     assertThat(size(first, "ledger").width).isLessThan(ledgerBefore);
@@ -81,7 +81,7 @@ class MemoryTest {
       second.ready();
       assertThat(size(second, "sheet").width).isEqualTo(sheet.width);
       assertThat(size(second, "picture").height)
-          .isCloseTo(picture.height, org.assertj.core.data.Offset.offset(2));
+          .isCloseTo(picture.height, org.assertj.core.data.Offset.offset(LedgerCells.ROW));
     }
   }
 }

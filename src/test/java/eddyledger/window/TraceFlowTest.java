@@ -3,9 +3,12 @@ package eddyledger.window;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.awt.Toolkit;
+import java.awt.datatransfer.Clipboard;
 import java.awt.datatransfer.DataFlavor;
+import java.awt.datatransfer.StringSelection;
 import java.awt.event.KeyEvent;
 import java.io.IOException;
+import java.util.concurrent.atomic.AtomicReference;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 
@@ -26,14 +29,24 @@ class TraceFlowTest extends WindowFlow {
     harness.until("the trace shows", () -> harness.shows("trace"));
   }
 
-  private String copied() throws Exception {
+  /** What the button puts on the clipboard, once the desktop has taken it over. */
+  private String copied() {
+    Clipboard clipboard = Toolkit.getDefaultToolkit().getSystemClipboard();
+    clipboard.setContents(new StringSelection("nothing copied"), null);
     harness.window.button("trace.copy").click();
-    return (String)
-        Toolkit.getDefaultToolkit().getSystemClipboard().getData(DataFlavor.stringFlavor);
+    AtomicReference<String> text = new AtomicReference<>();
+    harness.until(
+        "the account is on the clipboard",
+        () -> {
+          boolean there = clipboard.isDataFlavorAvailable(DataFlavor.stringFlavor);
+          text.set(there ? (String) clipboard.getData(DataFlavor.stringFlavor) : "");
+          return text.get().startsWith("Upper side left");
+        });
+    return text.get();
   }
 
   @Test
-  void theAccountIsOfTheVehicleAsItWasEdited() throws Exception {
+  void theAccountIsOfTheVehicleAsItWasEdited() {
     trace();
     assertThat(copied()).contains("61.0");
     harness.press(KeyEvent.VK_ESCAPE);
@@ -48,7 +61,7 @@ class TraceFlowTest extends WindowFlow {
   }
 
   @Test
-  void theReceiverChangesOnTheTraceToo() throws Exception {
+  void theReceiverChangesOnTheTraceToo() {
     trace();
     assertThat(harness.window.label("trace.title").text()).contains("Upper side left, station A");
     assertThat(copied()).contains("Heard at Row 2, window seat in Holding");
