@@ -105,7 +105,7 @@ class SheetPresenterTest {
         .isEqualTo("“x” is not a unit for this. It takes m, mm, in, ft.");
     assertThat(desk.settings("upper-side-left-a").length()).isEqualTo(0.6);
     desk.sheet.leave("length");
-    assertThat(desk.field("length").text()).isEqualTo("0.600");
+    assertThat(desk.field("length").text()).isEqualTo("0.500");
     assertThat(desk.field("length").message()).isNull();
   }
 
