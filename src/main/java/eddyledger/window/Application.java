@@ -44,11 +44,7 @@ public final class Application {
   private String page = START;
   private Path remembered;
 
-  /**
-   * Builds the window; {@link #show} shows it.
-   *
-   * @param closed runs when the window has been closed
-   */
+  /** Builds the window; {@link #show} shows it, and {@code closed} runs once it is closed. */
   public Application(Services services, Runnable closed) {
     this.services = services;
     this.closed = closed;
@@ -56,6 +52,8 @@ public final class Application {
     Theme.install(memory.palette());
     frame = new MainFrame(memory);
     Dialogs dialogs = new Dialogs(frame);
+    // before all that shows something: while views say "older", the numbers are on their way
+    state.listen(this::recompute);
     desk = new DeskParts(state, memory, this::showTrace);
     trace = new TraceView(() -> page(DESK));
     guide = new TraceGuide(state, trace);
@@ -93,10 +91,8 @@ public final class Application {
       case PROJECT -> {
         remembered = null;
         page(state.open() ? DESK : START);
-        compute();
         refreshStart();
       }
-      case VEHICLE -> compute();
       case LEDGER -> {
         remember();
         retrace();
@@ -107,6 +103,12 @@ public final class Application {
     retitle();
     menus.refresh();
     desk.refresh();
+  }
+
+  private void recompute(Aspect aspect) {
+    if (aspect == Aspect.PROJECT || aspect == Aspect.VEHICLE) {
+      compute();
+    }
   }
 
   private void retitle() {
