@@ -41,6 +41,9 @@ public final class Eddyledger {
                     new Examples(reader),
                     new FaultReport(),
                     Preferences.userRoot().node("eddyledger/window")));
+    if (arguments.length == 0 || arguments[0].equals("window")) {
+      window.prepare();
+    }
     int code = new MainCommand(projects, tables, workbooks, window, out, err).run(arguments);
     System.exit(code);
   }

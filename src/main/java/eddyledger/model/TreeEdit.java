@@ -11,7 +11,31 @@ public final class TreeEdit {
 
   /** The way down to a node; empty if the tree has none of that id. */
   public static Optional<TreePath> find(Vehicle vehicle, String id) {
-    return TreePath.of(vehicle).stream().filter(path -> path.node().id().equals(id)).findFirst();
+    return Optional.ofNullable(find(vehicle.tree(), id, List.of(), List.of()));
+  }
+
+  /** Looked for all the time: nothing is made of the nodes passed by. */
+  private static TreePath find(
+      List<Node> nodes, String id, List<Section> above, List<Integer> positions) {
+    for (int i = 0; i < nodes.size(); i++) {
+      Node node = nodes.get(i);
+      TreePath found = null;
+      if (node.id().equals(id)) {
+        found = new TreePath(node, above, with(positions, i));
+      } else if (node instanceof Section section && !section.children().isEmpty()) {
+        found = find(section.children(), id, with(above, section), with(positions, i));
+      }
+      if (found != null) {
+        return found;
+      }
+    }
+    return null;
+  }
+
+  private static <T> List<T> with(List<T> some, T last) {
+    List<T> more = new ArrayList<>(some);
+    more.add(last);
+    return more;
   }
 
   /** The vehicle with the node of an id changed; as it was if there is none. */

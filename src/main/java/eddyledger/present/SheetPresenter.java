@@ -59,7 +59,10 @@ public final class SheetPresenter {
       units.remove(SpeedEntry.KEY);
     }
     looked = now;
-    tell();
+    if (!stay.editing()) {
+      // whoever edits from here tells once, when all is done
+      tell();
+    }
   }
 
   private void tell() {

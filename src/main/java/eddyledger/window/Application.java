@@ -44,11 +44,7 @@ public final class Application {
   private String page = START;
   private Path remembered;
 
-  /**
-   * Builds the window; {@link #show} shows it.
-   *
-   * @param closed runs when the window has been closed
-   */
+  /** Builds the window; {@link #show} shows it, and {@code closed} runs once it is closed. */
   public Application(Services services, Runnable closed) {
     this.services = services;
     this.closed = closed;
@@ -56,6 +52,8 @@ public final class Application {
     Theme.install(memory.palette());
     frame = new MainFrame(memory);
     Dialogs dialogs = new Dialogs(frame);
+    // before all that shows something: while views say "older", the numbers are on their way
+    state.listen(this::recompute);
     desk = new DeskParts(state, memory, this::showTrace);
     trace = new TraceView(() -> page(DESK));
     guide = new TraceGuide(state, trace);
@@ -95,9 +93,7 @@ public final class Application {
         // what is there to be chosen from decides what the start page gives the focus to
         refreshStart();
         page(state.open() ? DESK : START);
-        compute();
       }
-      case VEHICLE -> compute();
       case LEDGER -> {
         remember();
         retrace();
@@ -108,6 +104,12 @@ public final class Application {
     retitle();
     menus.refresh();
     desk.refresh();
+  }
+
+  private void recompute(Aspect aspect) {
+    if (aspect == Aspect.PROJECT || aspect == Aspect.VEHICLE) {
+      compute();
+    }
   }
 
   private void retitle() {

@@ -12,10 +12,27 @@ import java.util.Optional;
 
 /** The marks in the gutter: the ledger is the legend of the picture. */
 final class Gutter {
-  private Gutter() {}
+  private ReceiverSheet sheet;
+  private String selected;
+  private List<LedgerLine> lines;
+  private List<GutterMark> marks = List.of();
 
-  /** One mark for each line; null where a line is in no part, or in several. */
-  static List<GutterMark> marks(
+  /**
+   * One mark for each line; null where a line is in no part, or in several. Marks are kept while
+   * sheet and lines stay the same objects.
+   */
+  List<GutterMark> marks(Optional<ReceiverSheet> of, String selectedId, List<LedgerLine> visible) {
+    boolean same = of.orElse(null) == sheet && selectedId.equals(selected) && visible == lines;
+    if (!same) {
+      sheet = of.orElse(null);
+      selected = selectedId;
+      lines = visible;
+      marks = made(of, selectedId, visible);
+    }
+    return marks;
+  }
+
+  private static List<GutterMark> made(
       Optional<ReceiverSheet> sheet, String selectedId, List<LedgerLine> lines) {
     Map<String, StackPart> parts = new HashMap<>();
     sheet.ifPresent(

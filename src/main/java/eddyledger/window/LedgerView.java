@@ -29,6 +29,7 @@ public final class LedgerView extends JPanel {
   private final JScrollPane scroll = new JScrollPane(table);
   private final LedgerCell cell;
   private final LedgerWidths columns;
+  private final Gutter gutter = new Gutter();
   private boolean following;
   private String shown = "";
 
@@ -101,7 +102,7 @@ public final class LedgerView extends JPanel {
     Color paper = Theme.palette().paper();
     setBackground(paper);
     scroll.getViewport().setBackground(paper);
-    cell.gutter(Gutter.marks(presenter.sheet(), presenter.selectedId(), presenter.lines()));
+    cell.gutter(gutter.marks(presenter.sheet(), presenter.selectedId(), presenter.lines()));
     following = true;
     boolean reshaped = model.show(presenter.lines());
     columns.show(presenter.heading(), presenter.lines());

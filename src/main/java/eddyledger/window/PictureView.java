@@ -40,6 +40,18 @@ final class PictureView extends JPanel {
   private final JLabel absence = new JLabel("", SwingConstants.CENTER);
   private final CardLayout cards = new CardLayout();
   private final JPanel content = new JPanel(cards);
+  private transient Drawn drawn;
+
+  /** What a picture is drawn from; while it stays the same the picture does. */
+  private record Drawn(Picture kind, ReceiverSheet sheet, String row, Palette palette) {
+    boolean sameAs(Drawn other) {
+      return other != null
+          && kind == other.kind
+          && sheet == other.sheet
+          && row.equals(other.row)
+          && palette == other.palette;
+    }
+  }
 
   PictureView(PicturePresenter presenter, Runnable wholeDesk) {
     super(new BorderLayout());
@@ -78,15 +90,20 @@ final class PictureView extends JPanel {
 
   private void refresh() {
     heading.setText(presenter.picture().heading());
-    subHeading.setText(presenter.subHeading());
-    subHeading.setToolTipText(presenter.subHeading());
+    String words = presenter.subHeading();
+    subHeading.setText(words);
+    subHeading.setToolTipText(words);
     tabs.get(presenter.picture()).setSelected(true);
     tabs.forEach(
         (kind, tab) -> tab.setFont(kind == presenter.picture() ? Theme.strong(12) : Theme.body()));
     Optional<ReceiverSheet> sheet = presenter.sheet();
     if (sheet.isPresent()) {
-      ChartStyle style = new ChartStyle(Theme.palette(), Theme.body());
-      Pictures.show(picture, presenter.picture(), sheet.get(), presenter.row(), style);
+      Drawn wanted = new Drawn(presenter.picture(), sheet.get(), presenter.row(), Theme.palette());
+      if (!wanted.sameAs(drawn)) {
+        drawn = wanted;
+        ChartStyle style = new ChartStyle(wanted.palette(), Theme.body());
+        Pictures.show(picture, wanted.kind(), wanted.sheet(), wanted.row(), style);
+      }
       cards.show(content, DRAWN);
     } else {
       absence.setText(presenter.absence());

@@ -48,6 +48,7 @@ final class SheetForm extends JPanel implements Scrollable {
       };
   private final List<String> wanted = new ArrayList<>();
   private String row = "";
+  private boolean grown;
 
   SheetForm(SheetPresenter presenter, JComponent traceButton) {
     super(
@@ -94,9 +95,11 @@ final class SheetForm extends JPanel implements Scrollable {
         line("trace", () -> traceButton, "h 22!, growx 0, gaptop 2");
       }
     }
-    lines.entrySet().removeIf(entry -> gone(entry.getKey(), entry.getValue()));
-    revalidate();
-    repaint();
+    if (lines.entrySet().removeIf(entry -> gone(entry.getKey(), entry.getValue())) || grown) {
+      grown = false;
+      revalidate();
+      repaint();
+    }
   }
 
   private boolean gone(String key, JComponent line) {
@@ -123,7 +126,9 @@ final class SheetForm extends JPanel implements Scrollable {
     label.setText(words);
     label.setVisible(!words.isEmpty());
     label.setToolTipText(words.isEmpty() ? null : words);
-    label.setFont(font);
+    if (!font.equals(label.getFont())) {
+      label.setFont(font);
+    }
     label.setForeground(ink);
     Theme.named(label, "sheet." + key, words);
   }
@@ -136,6 +141,7 @@ final class SheetForm extends JPanel implements Scrollable {
     if (line == null) {
       line = maker.get();
       lines.put(key, line);
+      grown = true;
       follow(line);
       add(line, constraints, Math.min(placeOf(index), getComponentCount()));
     }

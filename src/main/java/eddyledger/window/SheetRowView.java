@@ -41,6 +41,7 @@ final class SheetRowView extends JPanel {
   private final JButton link = new LinkButton(null, "");
   private final WrapText message = new WrapText(MESSAGE_WIDTH);
   private SheetField shown;
+  private Palette inked;
 
   SheetRowView(SheetField field, SheetPresenter presenter) {
     this.presenter = presenter;
@@ -115,11 +116,18 @@ final class SheetRowView extends JPanel {
 
   /** Shows the field as it stands. */
   void show(SheetField field) {
-    shown = field;
     Palette palette = Theme.palette();
-    layout.setComponentConstraints(input.component(), place(field));
-    layout.setComponentConstraints(origin, behind(field) + ORIGIN);
-    layout.setComponentConstraints(back, behind(field) + BACK);
+    input.show(field);
+    if (field.equals(shown) && palette == inked) {
+      return; // most fields stay as they are when one is edited
+    }
+    if (shown == null || !place(field).equals(place(shown))) {
+      layout.setComponentConstraints(input.component(), place(field));
+      layout.setComponentConstraints(origin, behind(field) + ORIGIN);
+      layout.setComponentConstraints(back, behind(field) + BACK);
+    }
+    shown = field;
+    inked = palette;
     label.setText(field.label());
     label.setToolTipText(field.spoken());
     boolean faint = !field.own() && field.weight() != Weight.RESULT;
@@ -130,7 +138,6 @@ final class SheetRowView extends JPanel {
     boolean several = !field.units().isEmpty();
     unit.setCursor(several ? Cursor.getPredefinedCursor(Cursor.HAND_CURSOR) : null);
     unit.setToolTipText(several ? "Click for other units" : null);
-    input.show(field);
     menu.show(field);
     origin(field, palette);
     link.setVisible(!field.link().isEmpty());

@@ -18,13 +18,14 @@ import javax.swing.plaf.ColorUIResource;
 /** Puts the look in force: palette, fonts and measures of every standard component. */
 public final class Theme {
   private static final String PALETTE = "eddyledger.palette";
+  private static final String FONTS = "eddyledger.fonts";
   private static final int BODY = 12;
 
   private Theme() {}
 
   /** Puts a palette in force; windows already open follow. On the event thread. */
   public static void install(Palette palette) {
-    FlatInterFont.install();
+    loadFonts();
     FlatLaf.setGlobalExtraDefaults(
         Map.of(
             "@background", hex(palette.ground()),
@@ -46,6 +47,14 @@ public final class Theme {
     JDialog.setDefaultLookAndFeelDecorated(true);
     if (changed) {
       FlatLaf.updateUI();
+    }
+  }
+
+  /** Loads the fonts of the theme, once; may run on any thread. */
+  static synchronized void loadFonts() {
+    if (UIManager.get(FONTS) == null) {
+      FlatInterFont.install();
+      UIManager.put(FONTS, Boolean.TRUE);
     }
   }
 

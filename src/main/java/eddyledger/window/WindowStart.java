@@ -1,6 +1,7 @@
 package eddyledger.window;
 
 import eddyledger.command.WindowStarter;
+import java.awt.AWTError;
 import java.awt.GraphicsEnvironment;
 import java.nio.file.Path;
 import java.util.concurrent.CountDownLatch;
@@ -24,6 +25,36 @@ public final class WindowStart implements WindowStarter {
     this.services = services;
   }
 
+  /**
+   * Begins to load what a window needs, beside whatever the caller does before it opens one; does
+   * nothing where there is no display.
+   */
+  public void prepare() {
+    if (!possible()) {
+      return;
+    }
+    smooth();
+    Thread loading = new Thread(WindowStart::load, "window fonts");
+    loading.setDaemon(true);
+    loading.start();
+  }
+
+  private static void load() {
+    try {
+      Theme.loadFonts();
+    } catch (AWTError | LinkageError e) {
+      // the display cannot be used: opening the window meets the same, and says so
+      return;
+    }
+  }
+
+  /** Smooth text where the desktop does not ask for it; set before anything of the window loads. */
+  private static void smooth() {
+    if (System.getProperty("awt.useSystemAAFontSettings") == null) {
+      System.setProperty("awt.useSystemAAFontSettings", "on");
+    }
+  }
+
   @Override
   public boolean possible() {
     return !GraphicsEnvironment.isHeadless();
@@ -32,10 +63,7 @@ public final class WindowStart implements WindowStarter {
   @Override
   public void open(Path file) {
     SETTINGS_LOG.setLevel(Level.WARNING);
-    // smooth text where the desktop does not ask for it
-    if (System.getProperty("awt.useSystemAAFontSettings") == null) {
-      System.setProperty("awt.useSystemAAFontSettings", "on");
-    }
+    smooth();
     CountDownLatch closed = new CountDownLatch(1);
     SwingUtilities.invokeLater(
         () -> {

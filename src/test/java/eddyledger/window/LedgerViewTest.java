@@ -197,7 +197,8 @@ class LedgerViewTest {
         () -> {
           LedgerPresenter presenter = new LedgerPresenter(state);
           List<LedgerLine> lines = presenter.lines();
-          List<GutterMark> marks = Gutter.marks(presenter.sheet(), presenter.selectedId(), lines);
+          List<GutterMark> marks =
+              new Gutter().marks(presenter.sheet(), presenter.selectedId(), lines);
           assertThat(marks).hasSameSizeAs(lines);
           assertThat(marks.get(0)).isNull();
           assertThat(marks.get(1).fill()).isEqualTo(new StackFill(Kind.SERIES, 0));
