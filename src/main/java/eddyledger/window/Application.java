@@ -204,14 +204,6 @@ public final class Application {
     state.select(state.selection().on(edit.subject()));
   }
 
-  void undo() {
-    state.undo();
-  }
-
-  void redo() {
-    state.redo();
-  }
-
   void select(String rowId) {
     state.select(state.selection().on(rowId));
   }

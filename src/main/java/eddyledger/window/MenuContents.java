@@ -85,13 +85,13 @@ final class MenuContents {
             "edit.undo",
             () -> "Undo" + state.undoLabel().map(label -> " " + label).orElse(""),
             "ctrl Z",
-            application::undo,
+            state::undo,
             () -> state.undoLabel().isPresent()),
         Command.worded(
             "edit.redo",
             () -> "Redo" + state.redoLabel().map(label -> " " + label).orElse(""),
             "ctrl Y",
-            application::redo,
+            state::redo,
             () -> state.redoLabel().isPresent()));
   }
 
