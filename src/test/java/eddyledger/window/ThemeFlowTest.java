@@ -28,7 +28,7 @@ class ThemeFlowTest extends WindowFlow {
     harness.robot().waitForIdle();
   }
 
-  /** The colour that most of a component's lower edge is painted in. */
+  /** The colour of a component near its upper left corner. */
   private Color paper(String name) {
     return GuiActionRunner.execute(
         () -> {
@@ -40,7 +40,7 @@ class ThemeFlowTest extends WindowFlow {
           BufferedImage image =
               new BufferedImage(part.getWidth(), part.getHeight(), BufferedImage.TYPE_INT_RGB);
           part.paint(image.createGraphics());
-          return new Color(image.getRGB(3, part.getHeight() - 3));
+          return new Color(image.getRGB(3, 3));
         });
   }
 
@@ -53,7 +53,7 @@ class ThemeFlowTest extends WindowFlow {
             .orElseThrow();
     Point at = GuiActionRunner.execute(part::getLocationOnScreen);
     try {
-      return new java.awt.Robot().getPixelColor(at.x + 3, at.y + part.getHeight() - 3);
+      return new java.awt.Robot().getPixelColor(at.x + 3, at.y + 3);
     } catch (java.awt.AWTException e) {
       throw new AssertionError(e);
     }

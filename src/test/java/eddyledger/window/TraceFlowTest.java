@@ -77,9 +77,9 @@ class TraceFlowTest extends WindowFlow {
   void allNumbersAndStepsAreSwitched() {
     trace();
     harness.window.toggleButton("trace.show-numbers").click();
-    assertThat(harness.shows("trace.stages")).isFalse();
+    harness.until("the numbers show", () -> !harness.shows("trace.stages"));
     harness.window.toggleButton("trace.show-steps").click();
-    assertThat(harness.shows("trace.stages")).isTrue();
+    harness.until("the steps show", () -> harness.shows("trace.stages"));
     harness.window.button("trace.back").click();
     assertThat(harness.shows("ledger")).isTrue();
     harness.until("the ledger has the focus", () -> hands.focused().equals("ledger"));
