@@ -37,7 +37,6 @@ public final class Application {
   private final JPanel pages = new JPanel(cards);
   private final DeskParts desk;
   private final StartView start;
-  private final TraceView trace;
   private final TraceGuide guide;
   private final FileCommands files;
   private final Menus menus;
@@ -55,8 +54,7 @@ public final class Application {
     // before all that shows something: while views say "older", the numbers are on their way
     state.listen(this::recompute);
     desk = new DeskParts(state, memory, this::showTrace);
-    trace = new TraceView(() -> page(DESK));
-    guide = new TraceGuide(state, trace);
+    guide = new TraceGuide(state, () -> page(DESK));
     files = new FileCommands(state, services, dialogs, desk.statusView());
     start = new StartView(new StartActions(files, services.recent(), this::refreshStart));
     background =
@@ -70,7 +68,7 @@ public final class Application {
     state.listen(this::changed);
     pages.add(start, START);
     pages.add(desk.view(), DESK);
-    pages.add(trace, TRACE);
+    pages.add(guide.page(), TRACE);
     frame.fill(menus.bar(), pages, desk.statusView(), this::quit);
     frame.getRootPane().setTransferHandler(new FileDrop(files::open));
     refreshStart();
@@ -190,7 +188,7 @@ public final class Application {
     guide.begin();
     page(TRACE);
     retrace();
-    trace.requestFocusInWindow();
+    guide.focus();
   }
 
   private void retrace() {

@@ -3,22 +3,39 @@ package eddyledger.window;
 import eddyledger.app.ProjectState;
 import eddyledger.app.Selection;
 import eddyledger.present.TraceAccount;
+import java.awt.BorderLayout;
 import java.util.Optional;
+import javax.swing.JComponent;
+import javax.swing.JPanel;
 
-/** Keeps the trace view on the selected panel, receiver and condition, and on the band followed. */
+/**
+ * The trace page, made when it is first asked for: keeps its view on the selected panel, receiver
+ * and condition, and on the band followed.
+ */
 final class TraceGuide {
   private final ProjectState state;
-  private final TraceView view;
+  private final Runnable back;
+  private final JPanel page = new JPanel(new BorderLayout());
+  private TraceView view;
   private int band = TraceAccount.FIRST_BAND;
 
-  TraceGuide(ProjectState state, TraceView view) {
+  TraceGuide(ProjectState state, Runnable back) {
     this.state = state;
-    this.view = view;
-    view.onBand(this::follow);
+    this.back = back;
+  }
+
+  /** The page, empty until {@link #begin}. */
+  JComponent page() {
+    return page;
   }
 
   /** Begins at the band that is loudest. */
   void begin() {
+    if (view == null) {
+      view = new TraceView(back);
+      view.onBand(this::follow);
+      page.add(view);
+    }
     Selection at = state.selection();
     band =
         state
@@ -27,6 +44,11 @@ final class TraceGuide {
                 ledger ->
                     TraceAccount.loudestBand(ledger, at.rowId(), at.conditionId(), at.receiverId()))
             .orElse(TraceAccount.FIRST_BAND);
+  }
+
+  /** Moves the keyboard's focus into the account. */
+  void focus() {
+    view.requestFocusInWindow();
   }
 
   private void follow(int other) {
