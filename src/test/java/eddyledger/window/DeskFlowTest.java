@@ -131,7 +131,7 @@ class DeskFlowTest {
     assertThat(harness.selectedTile()).isNotEqualTo(condition);
 
     harness.press(KeyEvent.VK_F8);
-    assertThat(harness.shows("findings.list")).isTrue();
+    harness.untilShown("findings.list");
     assertThat(harness.window.list("findings.list").target().getSelectedIndex()).isZero();
     harness.press(KeyEvent.VK_F8);
     assertThat(harness.window.list("findings.list").target().getSelectedIndex()).isEqualTo(1);
@@ -141,19 +141,19 @@ class DeskFlowTest {
     assertThat(harness.window.toggleButton("picture.spectrum").target().isSelected()).isTrue();
 
     harness.press(KeyEvent.VK_3, KeyEvent.VK_CONTROL, KeyEvent.VK_SHIFT);
-    assertThat(harness.shows("ledger")).isFalse();
+    harness.untilHidden("ledger");
     harness.press(KeyEvent.VK_3, KeyEvent.VK_CONTROL, KeyEvent.VK_SHIFT);
-    assertThat(harness.shows("ledger")).isTrue();
+    harness.untilShown("ledger");
   }
 
   @Test
   void theTraceOpensAndGoesBack() {
     harness.clickRow(PANEL);
     harness.press(KeyEvent.VK_T, KeyEvent.VK_CONTROL);
-    assertThat(harness.shows("ledger")).isFalse();
-    assertThat(harness.shows("trace.back")).isTrue();
+    harness.untilHidden("ledger");
+    harness.untilShown("trace.back");
     harness.press(KeyEvent.VK_ESCAPE);
-    assertThat(harness.shows("ledger")).isTrue();
+    harness.untilShown("ledger");
   }
 
   @Test

@@ -43,7 +43,9 @@ class DeskKeysTest extends WindowFlow {
     assertThat(ruling()).isEqualTo("tile-cruise-row-16");
     assertThat(harness.row("quillon-82")).contains("74.8 dB(A)");
     assertThat(harness.row("station-a")).contains("| 48.0 |");
-    assertThat(hands.focused()).isEqualTo("tile-cruise-row-16");
+    harness.until(
+        "the focus is in " + "tile-cruise-row-16",
+        () -> hands.focused().equals("tile-cruise-row-16"));
   }
 
   @Test
@@ -80,7 +82,7 @@ class DeskKeysTest extends WindowFlow {
     harness.clickTile("tile-cruise-row-9");
     harness.clickRow("station-e");
     harness.press(KeyEvent.VK_J, KeyEvent.VK_CONTROL);
-    assertThat(hands.focused()).isEqualTo("ledger");
+    harness.until("the focus is in " + "ledger", () -> hands.focused().equals("ledger"));
     int row = harness.window.table("ledger").target().getSelectedRow();
     assertThat(row).isNotNegative();
     String worst = harness.rows().get(row);
@@ -127,7 +129,7 @@ class DeskKeysTest extends WindowFlow {
     harness.press(KeyEvent.VK_F8, KeyEvent.VK_SHIFT);
     harness.until("the field has the focus", () -> hands.focused().equals("sheet.length"));
     harness.window.button("findings.close").click();
-    assertThat(harness.shows("findings.list")).isFalse();
+    harness.untilHidden("findings.list");
   }
 
   @Test
@@ -152,20 +154,24 @@ class DeskKeysTest extends WindowFlow {
     for (int i = 0; i < regions.length; i++) {
       harness.press(keys[i], KeyEvent.VK_CONTROL, KeyEvent.VK_SHIFT);
       for (String region : regions) {
-        assertThat(harness.shows(region)).as(region).isEqualTo(region.equals(regions[i]));
+        if (region.equals(regions[i])) {
+          harness.untilShown(region);
+        } else {
+          harness.untilHidden(region);
+        }
       }
       harness.press(keys[i], KeyEvent.VK_CONTROL, KeyEvent.VK_SHIFT);
       for (String region : regions) {
-        assertThat(harness.shows(region)).as(region).isTrue();
+        harness.untilShown(region);
       }
     }
     harness.window.button("picture.whole").click();
-    assertThat(harness.shows("ledger")).isFalse();
+    harness.untilHidden("ledger");
     harness.window.button("picture.whole").click();
-    assertThat(harness.shows("ledger")).isTrue();
+    harness.untilShown("ledger");
     harness.press(KeyEvent.VK_2, KeyEvent.VK_CONTROL);
-    assertThat(hands.focused()).isEqualTo("sheet.name");
+    harness.until("the focus is in " + "sheet.name", () -> hands.focused().equals("sheet.name"));
     harness.press(KeyEvent.VK_1, KeyEvent.VK_CONTROL);
-    assertThat(hands.focused()).isEqualTo("ledger");
+    harness.until("the focus is in " + "ledger", () -> hands.focused().equals("ledger"));
   }
 }

@@ -67,8 +67,8 @@ final class Harness implements AutoCloseable {
   Harness(Preferences settings) {
     store = settings;
     robot = BasicRobot.robotWithNewAwtHierarchy();
-    robot.settings().delayBetweenEvents(20);
-    robot.settings().eventPostingDelay(40);
+    robot.settings().delayBetweenEvents(25);
+    robot.settings().eventPostingDelay(70);
     robot.settings().timeoutToFindSubMenu(2000);
     Thread.setDefaultUncaughtExceptionHandler(
         (thread, thrown) -> {
@@ -277,6 +277,16 @@ final class Harness implements AutoCloseable {
     return GuiActionRunner.execute(
         () ->
             all(window.target()).stream().anyMatch(c -> name.equals(c.getName()) && c.isShowing()));
+  }
+
+  /** Waits until a component of a name is on the screen. */
+  void untilShown(String name) {
+    until(name + " shows", () -> shows(name));
+  }
+
+  /** Waits until no component of a name is on the screen. */
+  void untilHidden(String name) {
+    until(name + " is gone", () -> !shows(name));
   }
 
   /** Opens every section of the ledger, by its key. */

@@ -77,7 +77,7 @@ class OpenFlowTest extends WindowFlow {
         .startsWith("The file cannot be used")
         .containsPattern("line \\d+");
     hands.answer("OK");
-    assertThat(harness.shows("ledger")).isTrue();
+    harness.untilShown("ledger");
   }
 
   @Test

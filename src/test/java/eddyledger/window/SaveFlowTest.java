@@ -89,7 +89,7 @@ class SaveFlowTest extends WindowFlow {
     harness.press(KeyEvent.VK_W, KeyEvent.VK_CONTROL);
     hands.answer("Save");
     hands.answer("Do not save");
-    assertThat(harness.shows("ledger")).isTrue();
+    harness.untilShown("ledger");
     assertThat(hands.field("name")).isEqualTo("Other name");
   }
 

@@ -47,14 +47,14 @@ class SheetFlowTest extends WindowFlow {
   @Test
   void anInheritedValueIsTypedOverAndGoesBack() {
     String before = harness.row(PANEL);
-    assertThat(harness.shows("sheet.length.back")).isFalse();
+    harness.untilHidden("sheet.length.back");
     hands.change("length", "0.4");
     assertThat(harness.row(PANEL)).isNotEqualTo(before);
     harness.window.button("sheet.length.back").click();
     harness.ready();
     assertThat(hands.field("length")).isEqualTo("0.500");
     assertThat(harness.row(PANEL)).isEqualTo(before);
-    assertThat(harness.shows("sheet.length.back")).isFalse();
+    harness.untilHidden("sheet.length.back");
     assertThat(hands.title()).doesNotContain("changed");
   }
 

@@ -84,7 +84,7 @@ class StartKeysTest extends WindowFlow {
         .startsWith("The file cannot be used")
         .contains(file.toString(), "There is no such file.");
     hands.answer("OK");
-    assertThat(harness.shows("start")).isTrue();
+    harness.untilShown("start");
     assertThat(hands.title()).isEqualTo("Eddyledger");
   }
 }

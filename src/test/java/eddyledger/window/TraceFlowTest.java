@@ -56,7 +56,7 @@ class TraceFlowTest extends WindowFlow {
     assertThat(copied()).contains("64.0").doesNotContain("61.0 dB(A)");
     harness.press(KeyEvent.VK_Z, KeyEvent.VK_CONTROL);
     harness.ready();
-    assertThat(harness.shows("trace")).isTrue();
+    harness.untilShown("trace");
     assertThat(copied()).contains("61.0").doesNotContain("64.0 dB(A)");
   }
 
@@ -81,7 +81,7 @@ class TraceFlowTest extends WindowFlow {
     harness.window.toggleButton("trace.show-steps").click();
     harness.until("the steps show", () -> harness.shows("trace.stages"));
     harness.window.button("trace.back").click();
-    assertThat(harness.shows("ledger")).isTrue();
+    harness.untilShown("ledger");
     harness.until("the ledger has the focus", () -> hands.focused().equals("ledger"));
   }
 }
